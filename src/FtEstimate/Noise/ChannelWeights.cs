@@ -1,0 +1,69 @@
+namespace FtEstimate.Noise;
+
+/// <summary>
+/// How strongly each kind of error counts towards the noise strength x, per unit probability, first order.
+/// Interim values from a Monte Carlo of distances 5 and 7 (within 9 % in Λ on eight noise mixes; the project's own estimate, not published),
+/// for a law whose threshold is <see cref="ReferenceThreshold"/>; they scale with the threshold of the law in use.
+/// </summary>
+/// <param name="Scale">Reference threshold over the threshold of the law in use.</param>
+public readonly record struct ChannelWeights(double Scale)
+{
+    /// <summary>Threshold of the uniform circuit that the weights refer to.</summary>
+    public const double ReferenceThreshold = 0.0056;
+
+    private const double CzWeight = 92;
+    private const double WaitingPerLayerWeight = 143;
+    private const double DataEventWeight = 23;
+    private const double CheckFlipWeight = 5.5;
+    private const double CheckResetWeight = 5;
+    private const double CheckGateWeight = 5;
+
+    // what waiting of every atom costs beyond the four data events of the layers falls on the checks
+    private const double CheckInSequenceWeight = (WaitingPerLayerWeight - (4 * DataEventWeight)) / 4;
+
+    /// <summary>Weights for a law with the given threshold.</summary>
+    public static ChannelWeights For(double threshold) => new(ReferenceThreshold / threshold);
+
+    /// <summary>CZ gates, all four layers.</summary>
+    public NoiseStrength Cz(double probability) => NoiseStrength.Even(Scale * CzWeight * probability);
+
+    /// <summary>One more CZ layer.</summary>
+    public NoiseStrength ExtraCzLayer(double probability) => Cz(probability / 4);
+
+    /// <summary>Waiting of every atom in each CZ layer; data atoms sit half the time in the Hadamard frame.</summary>
+    public NoiseStrength WaitingPerLayer(PauliChannel channel) =>
+        NoiseStrength.Even(Scale * WaitingPerLayerWeight * 0.75 * (channel.X + channel.Z + (2 * channel.Y)));
+
+    /// <summary>One event on each data atom per round; Z and Y errors flip logical X, X and Y errors flip logical Z.</summary>
+    public NoiseStrength DataEvent(PauliChannel channel) => new(
+        Scale * DataEventWeight * 1.5 * (channel.Z + channel.Y),
+        Scale * DataEventWeight * 1.5 * (channel.X + channel.Y));
+
+    /// <summary>A check read wrongly.</summary>
+    public NoiseStrength CheckFlip(double probability) => NoiseStrength.Even(Scale * CheckFlipWeight * probability);
+
+    /// <summary>A check that starts in the wrong state.</summary>
+    public NoiseStrength CheckReset(double probability) => NoiseStrength.Even(Scale * CheckResetWeight * probability);
+
+    /// <summary>A gate on each check before or after its CZ layers.</summary>
+    public NoiseStrength CheckGate(double probability) => NoiseStrength.Even(Scale * CheckGateWeight * probability);
+
+    /// <summary>An error on each check between its CZ layers.</summary>
+    public NoiseStrength CheckInSequence(double probability) => NoiseStrength.Even(Scale * CheckInSequenceWeight * probability);
+
+    /// <summary>
+    /// The uniform textbook circuit at one rate p for every location: CZ; the 2d−1 atoms without a gate in each layer; three waits of each data atom (two
+    /// Hadamard layers, measure and reset); flips; Hadamards on half of the checks, twice.
+    /// </summary>
+    public NoiseStrength Uniform(double probability, int distance)
+    {
+        double idle = ((2.0 * distance) - 1) / ((2.0 * distance * distance) - 1);
+        PauliChannel event1 = PauliChannel.Depolarising(probability);
+        return Cz(probability)
+            + WaitingPerLayer(PauliChannel.Depolarising(probability * idle))
+            + (DataEvent(event1) * 3)
+            + CheckFlip(probability)
+            + CheckReset(probability)
+            + CheckGate(probability);
+    }
+}

@@ -1,0 +1,172 @@
+using System.Collections.Immutable;
+using FtEstimate.Cycles;
+using FtEstimate.Machines;
+
+namespace FtEstimate.Noise;
+
+/// <summary>Times and noise of a machine of one size.</summary>
+/// <param name="Times">Durations of a round.</param>
+/// <param name="Strength">Noise strength per basis.</param>
+/// <param name="InjectedError">Pauli probability of an injected T state.</param>
+/// <param name="Loss">Where atoms are lost.</param>
+public readonly record struct OperatingState(CycleTimes Times, NoiseStrength Strength, double InjectedError, AtomLoss Loss);
+
+/// <summary>A way to run a machine (readout scheme and exposure chosen): times and noise for every size.</summary>
+public abstract class OperatingPoint
+{
+    private protected OperatingPoint()
+    {
+    }
+
+    /// <summary>Check atoms held for each check site: banks times atoms per check.</summary>
+    public abstract int CheckAtomsPerSite { get; }
+
+    /// <summary>Check atoms in use in one round for each check site.</summary>
+    public abstract int CheckAtomsInUse { get; }
+
+    /// <summary>Times and noise for a load; extra waiting of the data atoms per round is added to both.</summary>
+    public abstract OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0);
+
+    /// <summary>From a logical measurement at a distance to the operation that depends on it.</summary>
+    public abstract double ReactionSeconds(int distance);
+
+    /// <summary>Time a patch takes to travel to its partner for a transversal gate.</summary>
+    public abstract double PatchMoveSeconds(int distance);
+}
+
+/// <summary>An atom array under one scheme and exposure.</summary>
+/// <param name="noise">Its noise.</param>
+/// <param name="control">Decoding and feed-forward.</param>
+public sealed class AtomOperatingPoint(AtomNoise noise, Control control) : OperatingPoint
+{
+    /// <summary>The noise behind it.</summary>
+    public AtomNoise Noise { get; } = noise;
+
+    /// <inheritdoc/>
+    public override int CheckAtomsPerSite => CheckAtomsInUse * Noise.Cycle.Scheme.Banks;
+
+    /// <inheritdoc/>
+    public override int CheckAtomsInUse => Noise.Cycle.Scheme.AtomsPerCheck;
+
+    /// <inheritdoc/>
+    public override OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0)
+    {
+        CycleTimes times = Noise.Cycle.Times(load);
+        if (extraWaitingSeconds > 0)
+        {
+            times = times with
+            {
+                RoundSeconds = times.RoundSeconds + extraWaitingSeconds,
+                WaitingSeconds = times.WaitingSeconds + extraWaitingSeconds,
+            };
+        }
+
+        return new OperatingState(times, Noise.Strength(times), Noise.InjectedError(times), Noise.Loss(times));
+    }
+
+    /// <inheritdoc/>
+    public override double ReactionSeconds(int distance) =>
+        Noise.Cycle.Reading.ExposureSeconds + Noise.Cycle.Scheme.Detector.TransferSeconds
+        + (distance * control.DecodeSecondsPerRound) + control.FeedForwardSeconds;
+
+    /// <inheritdoc/>
+    public override double PatchMoveSeconds(int distance)
+    {
+        if (Noise.Array.Reach is not MovedAtoms moved)
+        {
+            return 0;
+        }
+
+        double metres = Noise.Array.Geometry.BlockSpacingMetres ?? (distance * Noise.Array.Geometry.PitchMetres);
+        return MoveTime.Seconds(moved.Profile, metres, moved.PeakAccelerationMetresPerSecondSquared) + (2 * moved.HandoffSeconds);
+    }
+}
+
+/// <summary>An abstract machine: the same times and noise at every size.</summary>
+/// <param name="apparatus">The stated figures.</param>
+/// <param name="threshold">Threshold of the law in use.</param>
+public sealed class AbstractOperatingPoint(AbstractApparatus apparatus, double threshold) : OperatingPoint
+{
+    /// <inheritdoc/>
+    public override int CheckAtomsPerSite => 1;
+
+    /// <inheritdoc/>
+    public override int CheckAtomsInUse => 1;
+
+    /// <inheritdoc/>
+    public override OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0) => new(
+        new CycleTimes(apparatus.RoundSeconds + extraWaitingSeconds, apparatus.RoundSeconds / SyndromeCycle.Layers, 0, 0, false),
+        NoiseStrength.Even(apparatus.UniformError / threshold),
+        apparatus.UniformError,
+        default);
+
+    /// <inheritdoc/>
+    public override double ReactionSeconds(int distance) => apparatus.ReactionSeconds;
+
+    /// <inheritdoc/>
+    public override double PatchMoveSeconds(int distance) => 0;
+}
+
+/// <summary>The exposures a sizing tries.</summary>
+public static class Exposures
+{
+    /// <summary>Points per decade of the exposure grid, which does not depend on the machine.</summary>
+    public const int PerDecade = 24;
+
+    private const double ShortestSeconds = 1e-7;
+
+    private const double LongestSeconds = 1;
+
+    /// <summary>
+    /// The stated exposure; or, when it is left to the sizing, the points of a fixed grid from a hundredth of the exposure with the fewest flips
+    /// up to that one: a longer look flips more and waits longer.
+    /// </summary>
+    public static ImmutableArray<double> ToTry(ReadoutScheme scheme)
+    {
+        if (scheme.Detector is not PhotonCounting counting)
+        {
+            return [((StatedReadout)scheme.Detector).StatedExposureSeconds];
+        }
+
+        if (counting.ExposureSeconds is { } stated)
+        {
+            return [stated];
+        }
+
+        int last = FewestFlips(counting, scheme.AtomsPerCheck);
+        int first = Math.Max(0, last - (2 * PerDecade));
+        var seconds = ImmutableArray.CreateBuilder<double>(last - first + 1);
+        for (int i = first; i <= last; i++)
+        {
+            seconds.Add(Grid(i));
+        }
+
+        return seconds.ToImmutable();
+    }
+
+    private static double Grid(int index) => ShortestSeconds * Math.Pow(10, (double)index / PerDecade);
+
+    /// <summary>Grid point with the fewest flips; beyond it depumping and background win, or nothing is left to gain.</summary>
+    private static int FewestFlips(PhotonCounting counting, int atoms)
+    {
+        const double nothingToGain = 1e-8;
+        int best = 0;
+        double fewest = 1;
+        for (int i = 0; Grid(i) <= LongestSeconds; i++)
+        {
+            double flip = PhotonStatistics.Read(counting, atoms, Grid(i)).Flip;
+            if (flip < fewest)
+            {
+                (best, fewest) = (i, flip);
+            }
+
+            bool pastBest = i > best + PerDecade && fewest < 0.4;
+            if (fewest < nothingToGain || pastBest)
+            {
+                break;
+            }
+        }
+
+        return best;
+    }
+}
