@@ -1,0 +1,76 @@
+using FtEstimate.MagicStates;
+using FtEstimate.Noise;
+using FtEstimate.SurfaceCode;
+
+namespace FtEstimate.Sizing;
+
+/// <summary>The factories a search may use at a given noise: the whole catalogue, or the one the scenario fixes.</summary>
+/// <param name="space">The search space.</param>
+/// <param name="catalogue">The catalogue, which remembers what it has evaluated.</param>
+internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogue)
+{
+    /// <summary>How a scenario names the tile factory.</summary>
+    public const string TileFactoryName = "tile-15-to-1";
+
+    private readonly FactoryDesign? _design =
+        FactoryDesign.TryParse(space.Scenario.Method.Factory, out FactoryDesign? design, out _) ? design : null;
+
+    /// <summary>Whether factories are tiles of the data distance, whose logical errors count with those of all tiles.</summary>
+    public bool CountsAsTiles => space.Scenario.Method.Factory == TileFactoryName;
+
+    /// <summary>Factories at the noise rounded up to the catalogue's grid, so that neighbouring sizes share an evaluation.</summary>
+    /// <param name="state">Times and noise.</param>
+    /// <param name="distance">Code distance of the tiles.</param>
+    /// <param name="errorAtMost">No state may err more.</param>
+    public IReadOnlyList<Factory> At(in OperatingState state, int distance, double errorAtMost)
+    {
+        double injected = Injected(state);
+        if (CountsAsTiles)
+        {
+            return [TileFactory.Of(distance, space.Patch.AtomsPerTile(distance), injected)];
+        }
+
+        NoiseGrid noise = NoiseGrid.RoundedUp(state.Strength, injected);
+        return _design is { } fixedDesign
+            ? [catalogue.Evaluate(noise.Key, () => noise.Noise(space.Law), fixedDesign)]
+            : catalogue.Undominated(noise.Key, () => noise.Noise(space.Law), errorAtMost);
+    }
+
+    /// <summary>One factory at the exact noise, for the report.</summary>
+    public Factory Exactly(Factory factory, in OperatingState state)
+    {
+        if (factory.Design is not { } chosen)
+        {
+            return factory;
+        }
+
+        NoiseStrength strength = state.Strength;
+        return Factory.Of(chosen, new FactoryNoise(d => PatchError.PerRound(space.Law, strength, d), Injected(state)));
+    }
+
+    private double Injected(in OperatingState state) => space.Scenario.Method.InjectedError ?? state.InjectedError;
+}
+
+/// <summary>A noise rounded up to the 2 % grid of the catalogue.</summary>
+/// <param name="Key">Its place on the grid.</param>
+/// <param name="Strength">Noise strength there.</param>
+/// <param name="InjectedError">Injected error there.</param>
+internal readonly record struct NoiseGrid(NoiseKey Key, NoiseStrength Strength, double InjectedError)
+{
+    /// <summary>The grid point at or above a noise in every respect.</summary>
+    public static NoiseGrid RoundedUp(NoiseStrength strength, double injectedError)
+    {
+        NoiseBin x = NoiseBin.RoundedUp(strength.X);
+        NoiseBin z = NoiseBin.RoundedUp(strength.Z);
+        NoiseBin injected = NoiseBin.RoundedUp(injectedError);
+        return new NoiseGrid(
+            new NoiseKey(x.Index, z.Index, injected.Index), new NoiseStrength(x.Value, z.Value), injected.Value);
+    }
+
+    /// <summary>The noise a factory sees.</summary>
+    public FactoryNoise Noise(IScalingLaw law)
+    {
+        NoiseStrength strength = Strength;
+        return new FactoryNoise(d => PatchError.PerRound(law, strength, d), InjectedError);
+    }
+}

@@ -1,0 +1,161 @@
+using FtEstimate.Cycles;
+using FtEstimate.MagicStates;
+using FtEstimate.Noise;
+using FtEstimate.Scenarios;
+using FtEstimate.SurfaceCode;
+
+namespace FtEstimate.Sizing;
+
+/// <summary>
+/// The joint search over exposures, layouts, distances, factory designs and counts. It is exhaustive on its grids; what it skips is beaten by a machine
+/// already found, by bounds that hold for every machine skipped (fewest atoms, shortest run).
+/// </summary>
+internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, SearchLimits limits, LogicStyle style)
+{
+    /// <summary>Machine sizes are walked in steps of this ratio; within a step all factories see the noise of its upper end.</summary>
+    private const double SizeStep = 1.1;
+
+    /// <summary>Once the tiles take less than this share of the allowed failure, a larger distance buys nothing.</summary>
+    private const double NegligibleShare = 1e-3;
+
+    /// <summary>At most this many factory counts are tried within one size step.</summary>
+    private const int CountsPerSizeStep = 8;
+
+    private readonly CandidateTrial _trial = new(space, factories, limits);
+    private readonly UnbeatenSet _unbeaten = new();
+
+    /// <summary>Unbeaten machines of one style, fewest atoms first; empty when none meets the goal.</summary>
+    public IReadOnlyList<Candidate> Run()
+    {
+        foreach (OperatingPoint point in space.Points)
+        {
+            foreach (LogicLayout layout in space.Layouts)
+            {
+                if (layout.Style == style)
+                {
+                    SearchDistances(point, layout);
+                }
+            }
+        }
+
+        return _unbeaten.Members;
+    }
+
+    private void SearchDistances(OperatingPoint point, LogicLayout layout)
+    {
+        for (int distance = 3; distance <= SearchSpace.LargestDistance; distance += 2)
+        {
+            TrialBase bare = _trial.WithoutFactories(point, layout, distance);
+            bool hopeless = bare.Strength.Worse >= 1
+                || bare.Atoms > limits.AtomsAtMost
+                || _unbeaten.Beats(bare.Atoms, bare.RunSeconds);
+            if (hopeless)
+            {
+                // a larger distance has more atoms, longer layers and a longer run
+                return;
+            }
+
+            if (bare.PatchFailure >= limits.FailureAtMost)
+            {
+                continue;
+            }
+
+            SearchFactories(bare);
+            if (bare.PatchFailure < NegligibleShare * limits.FailureAtMost)
+            {
+                return;
+            }
+        }
+    }
+
+    private void SearchFactories(in TrialBase bare)
+    {
+        if (bare.LeastTStates <= 0)
+        {
+            _trial.Try(bare, null, 0, _unbeaten);
+            return;
+        }
+
+        double allowed = limits.Each ? limits.FailureAtMost : limits.FailureAtMost - bare.PatchFailure;
+        double errorAtMost = allowed / bare.LeastTStates;
+        for (int step = SizeStepOf(bare.TileAtoms); ; step++)
+        {
+            double low = Math.Pow(SizeStep, step);
+            double high = low * SizeStep;
+            OperatingState state = bare.Point.At(MachineLoad.Of(high, bare.Distance));
+            if (state.Strength.Worse >= 1)
+            {
+                return;
+            }
+
+            double longestUsefulRun = _trial.RunAtLoad(bare, state.Times.RoundSeconds);
+            bool moreIsUseful = false;
+            foreach (Factory factory in factories.At(state, bare.Distance, errorAtMost))
+            {
+                double roundsOfSupply = bare.LeastTStates * factory.RoundsPerOutput;
+                double useful = Math.Ceiling(roundsOfSupply * state.Times.RoundSeconds / longestUsefulRun);
+                double most = Math.Floor((high - bare.TileAtoms) / factory.Atoms);
+                double least = Math.Max(1, Math.Floor((low - bare.TileAtoms) / factory.Atoms) + 1);
+                moreIsUseful |= useful > most;
+                TryCounts(bare, factory, least, Math.Min(most, useful));
+            }
+
+            if (!moreIsUseful || bare.Atoms * (high / bare.TileAtoms) > limits.AtomsAtMost * SizeStep)
+            {
+                return;
+            }
+        }
+    }
+
+    private void TryCounts(in TrialBase bare, Factory factory, double least, double most)
+    {
+        if (space.Scenario.Method.FactoryCount is { } only)
+        {
+            // the scenario fixes the count: it counts as useful even where fewer would do
+            if (only >= least)
+            {
+                _trial.Try(bare, factory, only, _unbeaten);
+            }
+
+            return;
+        }
+
+        double stride = Math.Max(1, Math.Ceiling((most - least + 1) / CountsPerSizeStep));
+        for (double count = most; count >= least; count -= stride)
+        {
+            _trial.Try(bare, factory, (int)count, _unbeaten);
+        }
+    }
+
+    private static int SizeStepOf(double sites) => (int)Math.Floor(Math.Log(sites) / Math.Log(SizeStep));
+}
+
+/// <summary>What every machine must keep to.</summary>
+/// <param name="FailureAtMost">Failure probability of one shot.</param>
+/// <param name="Each">Whether each contribution may use all of it.</param>
+/// <param name="AtomsAtMost">Atoms; infinite when not limited.</param>
+/// <param name="ElapsedAtMost">Elapsed seconds; infinite when not limited.</param>
+/// <param name="SupplyPerSecond">Atoms delivered per second; infinite when not limited.</param>
+internal sealed record SearchLimits(
+    double FailureAtMost,
+    bool Each,
+    double AtomsAtMost,
+    double ElapsedAtMost,
+    double SupplyPerSecond)
+{
+    /// <summary>The limits of a scenario.</summary>
+    public static SearchLimits Of(Scenario scenario) => new(
+        scenario.Goal.FailureProbability,
+        scenario.Method.FailureSplit == "each",
+        scenario.Goal.AtomsAtMost ?? double.PositiveInfinity,
+        scenario.Goal.RunSecondsAtMost ?? double.PositiveInfinity,
+        scenario.Machine.Supply.AtomsPerSecond ?? double.PositiveInfinity);
+
+    /// <summary>The same goal without limits on atoms, time and supply.</summary>
+    public SearchLimits WithoutResources() => this with
+    {
+        AtomsAtMost = double.PositiveInfinity,
+        ElapsedAtMost = double.PositiveInfinity,
+        SupplyPerSecond = double.PositiveInfinity,
+    };
+}

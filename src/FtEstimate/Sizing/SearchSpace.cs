@@ -1,0 +1,82 @@
+using System.Collections.Immutable;
+using FtEstimate.Cycles;
+using FtEstimate.Machines;
+using FtEstimate.Noise;
+using FtEstimate.Scenarios;
+using FtEstimate.SurfaceCode;
+using FtEstimate.Workloads;
+
+namespace FtEstimate.Sizing;
+
+/// <summary>Everything a search chooses from, prepared once per scenario.</summary>
+/// <param name="Scenario">The question.</param>
+/// <param name="Law">The scaling law in use.</param>
+/// <param name="Patch">Atoms per tile.</param>
+/// <param name="Synthesis">How rotations are made of T gates.</param>
+/// <param name="Points">Ways to run the machine: readout and exposure.</param>
+/// <param name="Layouts">Ways to do logic.</param>
+public sealed record SearchSpace(
+    Scenario Scenario,
+    IScalingLaw Law,
+    PatchLayout Patch,
+    RotationSynthesis Synthesis,
+    ImmutableArray<OperatingPoint> Points,
+    ImmutableArray<LogicLayout> Layouts)
+{
+    /// <summary>Largest code distance considered.</summary>
+    public const int LargestDistance = 99;
+
+    /// <summary>The space a scenario leaves open, with the readout in use.</summary>
+    /// <param name="scenario">The question; names of law, patch and synthesis are known to exist.</param>
+    public static SearchSpace Of(Scenario scenario)
+    {
+        IScalingLaw law = ScalingLaws.Named(scenario.Method.Law) ?? ScalingLaws.PublishedFit;
+        PatchLayout patch = PatchLayout.Named(scenario.Method.Patch) ?? PatchLayout.Bare;
+        RotationSynthesis synthesis = RotationSynthesis.Named(scenario.Method.Synthesis) ?? RotationSynthesis.RepeatUntilSuccess;
+        bool movesAtoms = scenario.Machine.Apparatus is AtomArray { Reach: MovedAtoms };
+        return new SearchSpace(
+            scenario,
+            law,
+            patch,
+            synthesis,
+            PointsOf(scenario.Machine, law),
+            LogicLayout.ToTry(scenario.Workload, scenario.Method, movesAtoms));
+    }
+
+    /// <summary>
+    /// The operating points: one per exposure tried, least noise first. An exposure that another beats in round time and in noise is dropped.
+    /// </summary>
+    private static ImmutableArray<OperatingPoint> PointsOf(Machine machine, IScalingLaw law)
+    {
+        if (machine.Apparatus is not AtomArray array)
+        {
+            return [new AbstractOperatingPoint((AbstractApparatus)machine.Apparatus, law.Threshold)];
+        }
+
+        ChannelWeights weights = ChannelWeights.For(law.Threshold);
+        MachineLoad onePatch = MachineLoad.Of(2, 3);
+        var tried = new List<(OperatingPoint Point, OperatingState State)>();
+        foreach (double exposure in Exposures.ToTry(array.Readout))
+        {
+            var noise = new AtomNoise(array, SyndromeCycle.Of(array, array.Readout, exposure), weights);
+            var point = new AtomOperatingPoint(noise, machine.Control);
+            tried.Add((point, point.At(onePatch)));
+        }
+
+        // exposures rise, and so do round times: keep each that is quieter than all shorter ones
+        tried.Sort((a, b) => a.State.Times.RoundSeconds.CompareTo(b.State.Times.RoundSeconds));
+        var kept = new List<(OperatingPoint Point, OperatingState State)>();
+        double quietest = double.PositiveInfinity;
+        foreach ((OperatingPoint Point, OperatingState State) candidate in tried)
+        {
+            if (candidate.State.Strength.Mean < quietest)
+            {
+                quietest = candidate.State.Strength.Mean;
+                kept.Add(candidate);
+            }
+        }
+
+        kept.Reverse();
+        return [.. kept.Select(candidate => candidate.Point)];
+    }
+}
