@@ -3,7 +3,7 @@ using System.Globalization;
 namespace FtEstimate.Quantities;
 
 /// <summary>Numbers as text, to the digits they deserve; always in the invariant culture.</summary>
-/// <remarks>A value that is not a finite number reads "n/a": it must never reach a reader as a number.</remarks>
+/// <remarks>An exact half rounds to the even digit. A value that is not a finite number reads "n/a": it must never reach a reader as a number.</remarks>
 public static class Show
 {
     private const string NotANumber = "n/a";
@@ -53,6 +53,11 @@ public static class Show
     public static string Probability(double probability)
     {
         double rest = 1 - probability;
+        if (!double.IsFinite(rest))
+        {
+            return NotANumber;
+        }
+
         if (Math.Abs(rest) < NoRest)
         {
             return "1";
@@ -72,6 +77,11 @@ public static class Show
     public static string Percent(double fraction)
     {
         double rest = 1 - fraction;
+        if (!double.IsFinite(rest))
+        {
+            return NotANumber;
+        }
+
         if (Math.Abs(rest) < NoRest)
         {
             return "100 %";
