@@ -40,7 +40,7 @@ public static class PhotonStatistics
             }
         }
 
-        double lossPerLook = -Exponential.MinusOne(-detector.LossPerSecond * exposureSeconds);
+        double lossPerLook = -ElementaryFunctions.ExpMinusOne(-detector.LossPerSecond * exposureSeconds);
         return new CheckReading(exposureSeconds, best, darkFlip, Math.Min(brightFlip, 1), lossPerLook);
     }
 

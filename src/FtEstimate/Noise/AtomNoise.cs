@@ -56,7 +56,7 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     /// <summary>Where atoms are lost, for given durations.</summary>
     public AtomLoss Loss(in CycleTimes times)
     {
-        double vacuum = -Exponential.MinusOne(-times.RoundSeconds / Array.Coherence.VacuumLifetimeSeconds);
+        double vacuum = -ElementaryFunctions.ExpMinusOne(-times.RoundSeconds / Array.Coherence.VacuumLifetimeSeconds);
         double everyRounds = Array.Coherence.LossCheck.EveryRounds;
         double look = Cycle.Reading.LossPerLook;
         double looksAtData = _lossCheck == LossCheckMethod.Swap ? 1 / everyRounds : 0;
@@ -130,7 +130,7 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
             InPlace bare => bare.DataDisturbancePerSecond,
             _ => 0,
         };
-        double light = -Exponential.MinusOne(-rate * lit);
+        double light = -ElementaryFunctions.ExpMinusOne(-rate * lit);
         sink.Add("Light on data during readout", light, looks, Weights.DataEvent(PauliChannel.Depolarising(light)) * looks);
         sink.Add("Check readout", Cycle.Reading.Flip, 1, Weights.CheckFlip(Cycle.Reading.Flip));
         if (Cycle.Scheme is Shelved scheme)

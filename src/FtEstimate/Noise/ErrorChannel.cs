@@ -40,7 +40,7 @@ public sealed record ErrorLedger(ImmutableArray<ErrorChannel> Channels)
 internal interface IChannelSink
 {
     /// <summary>Takes one cause.</summary>
-    public void Add(string name, double perLocation, double timesPerRound, NoiseStrength strength);
+    void Add(string name, double perLocation, double timesPerRound, NoiseStrength strength);
 }
 
 /// <summary>Adds the strengths up.</summary>

@@ -14,7 +14,7 @@ public readonly record struct OperatingState(CycleTimes Times, NoiseStrength Str
 /// <summary>A way to run a machine (readout scheme and exposure chosen): times and noise for every size.</summary>
 public abstract class OperatingPoint
 {
-    private protected OperatingPoint()
+    internal OperatingPoint()
     {
     }
 

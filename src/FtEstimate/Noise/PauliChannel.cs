@@ -24,8 +24,8 @@ public readonly record struct PauliChannel(double X, double Y, double Z)
     /// <param name="t2Seconds">Coherence time, at most 2·T1.</param>
     public static PauliChannel Waiting(double seconds, double t1Seconds, double t2Seconds)
     {
-        double relaxed = -Exponential.MinusOne(-seconds / t1Seconds) / 4;
-        double dephased = -Exponential.MinusOne(-seconds / t2Seconds) / 2;
+        double relaxed = -ElementaryFunctions.ExpMinusOne(-seconds / t1Seconds) / 4;
+        double dephased = -ElementaryFunctions.ExpMinusOne(-seconds / t2Seconds) / 2;
         return new(relaxed, relaxed, Math.Max(dephased - relaxed, 0));
     }
 }

@@ -12,18 +12,22 @@ public static class FailureComposition
     /// <summary>Chance that any of the risks strikes at least once, 0 to 1.</summary>
     public static double AnyOf(params ReadOnlySpan<RepeatedRisk> risks)
     {
-        double logSurvival = 0;
+        double expected = 0;
         foreach (RepeatedRisk risk in risks)
         {
-            // a certain failure done zero times must not give 0 × infinity
-            if (risk.Count > 0)
-            {
-                logSurvival += risk.Count * ElementaryFunctions.LogOnePlus(-risk.Probability);
-            }
+            expected += ExpectedFaults(risk.Count, risk.Probability);
         }
 
-        return -ElementaryFunctions.ExpMinusOne(logSurvival);
+        return OfExpected(expected);
     }
+
+    /// <summary>−n·ln(1 − p): for a rare fault its expected number, and always what adds up over independent risks.</summary>
+    public static double ExpectedFaults(double count, double probability) =>
+        // a certain failure done zero times must not give 0 × infinity
+        count > 0 ? -count * ElementaryFunctions.LogOnePlus(-probability) : 0;
+
+    /// <summary>Chance of at least one fault, given the sum of <see cref="ExpectedFaults"/>.</summary>
+    public static double OfExpected(double expectedFaults) => -ElementaryFunctions.ExpMinusOne(-expectedFaults);
 
     /// <summary>Chance that <paramref name="count"/> repeats of one risk fail at least once, 0 to 1.</summary>
     public static double Repeated(double count, double probability) => AnyOf(new RepeatedRisk(count, probability));

@@ -1,6 +1,7 @@
 using FtEstimate.Cycles;
 using FtEstimate.MagicStates;
 using FtEstimate.Noise;
+using FtEstimate.Quantities;
 using FtEstimate.Scenarios;
 using FtEstimate.SurfaceCode;
 
@@ -56,13 +57,17 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             strength,
             _leastDemand.TStates,
             clock.RunSeconds,
-            FailureBudget.Expected(layout.Tiles * clock.Rounds, perRound));
+            FailureComposition.ExpectedFaults(layout.Tiles * clock.Rounds, perRound));
     }
 
     /// <summary>Shortest run at a given round time, with unlimited supply.</summary>
     public double RunAtLoad(in TrialBase bare, double roundSeconds) => RunClock.Of(
         bare.Layout, _leastDemand, bare.Distance, roundSeconds + ExtraWaiting(bare.Point, bare.Layout, bare.Distance),
         bare.Point.ReactionSeconds(bare.Distance), 0).RunSeconds;
+
+    /// <summary>Round time with so many sites.</summary>
+    public static double RoundAtLoad(in TrialBase bare, double sites) =>
+        StateAt(bare.Point, bare.Layout, bare.Distance, sites).Times.RoundSeconds;
 
     /// <summary>Judges one machine and offers it to the unbeaten ones when it meets the goal.</summary>
     public void Try(in TrialBase bare, Factory? factory, int count, UnbeatenSet unbeaten)
@@ -91,8 +96,8 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             RunClock clock = RunClock.Of(
                 bare.Layout, demand, bare.Distance, state.Times.RoundSeconds, reaction, supplyRoundsPerT);
             FailureBudget failure = new(
-                FailureBudget.Expected(tiles * clock.Rounds, perRound),
-                FailureBudget.Expected(demand.TStates, factory?.OutputError ?? 0),
+                FailureComposition.ExpectedFaults(tiles * clock.Rounds, perRound),
+                FailureComposition.ExpectedFaults(demand.TStates, factory?.OutputError ?? 0),
                 demand.SynthesisFailure);
             if (failure.Meets(limits.FailureAtMost, limits.Each))
             {

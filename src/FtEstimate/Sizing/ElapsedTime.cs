@@ -1,21 +1,7 @@
+using FtEstimate.Machines;
 using FtEstimate.Quantities;
 
 namespace FtEstimate.Sizing;
-
-/// <summary>What interrupts a run.</summary>
-/// <param name="MeanSecondsBetweenStops">Mean time between unplanned stops, above 0; null: none.</param>
-/// <param name="SecondsToRestart">Repair after a stop, 0 or more.</param>
-/// <param name="StartSeconds">Preparation of each shot, 0 or more.</param>
-/// <param name="CalibrationFraction">Share of the time spent calibrating, 0 up to but not including 1.</param>
-public sealed record Interruptions(
-    double? MeanSecondsBetweenStops,
-    double SecondsToRestart,
-    double StartSeconds,
-    double CalibrationFraction)
-{
-    /// <summary>A machine that never stops and needs no care.</summary>
-    public static Interruptions None { get; } = new(null, 0, 0, 0);
-}
 
 /// <summary>Expected time on the wall clock until all shots have succeeded.</summary>
 /// <param name="Seconds">Expected elapsed seconds; null: the run does not finish.</param>
@@ -42,20 +28,20 @@ public sealed record ElapsedTime(double? Seconds, double WorkingSeconds, double 
     /// <param name="shotSeconds">Run time of one shot, 0 or more.</param>
     /// <param name="shots">Shots that must succeed, above 0.</param>
     /// <param name="shotFailureProbability">Chance that a shot that ran to its end is wrong and is repeated, 0 to 1.</param>
-    /// <param name="interruptions">What interrupts the run.</param>
-    public static ElapsedTime Of(double shotSeconds, double shots, double shotFailureProbability, Interruptions interruptions)
+    /// <param name="running">What interrupts the run.</param>
+    public static ElapsedTime Of(double shotSeconds, double shots, double shotFailureProbability, Running running)
     {
-        double working = shotSeconds / (1 - interruptions.CalibrationFraction);
-        double stops = interruptions.MeanSecondsBetweenStops is double mean ? Math.Min(working / mean, double.MaxValue) : 0;
+        double working = shotSeconds / (1 - running.CalibrationFraction);
+        double stops = running.MeanSecondsBetweenStops is double mean ? Math.Min(working / mean, double.MaxValue) : 0;
         double shot = working;
         if (stops > 0)
         {
             // e^x − 1 over x is 1 in the limit, so the form is safe for very rare stops
             double growth = ElementaryFunctions.ExpMinusOne(stops) / stops;
-            shot = growth * (working + stops * interruptions.SecondsToRestart);
+            shot = growth * (working + stops * running.RestartSeconds);
         }
 
-        double elapsed = shots * (shot + interruptions.StartSeconds) / (1 - shotFailureProbability);
+        double elapsed = shots * (shot + running.StartSeconds) / (1 - shotFailureProbability);
         return new ElapsedTime(double.IsFinite(elapsed) ? elapsed : null, working, stops);
     }
 }

@@ -30,9 +30,9 @@ internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogu
             return [TileFactory.Of(distance, space.Patch.AtomsPerTile(distance), injected)];
         }
 
-        NoiseGrid noise = NoiseGrid.RoundedUp(state.Strength, injected);
+        RoundedNoise noise = RoundedNoise.Of(space.Law, state.Strength, injected);
         return _design is { } fixedDesign
-            ? [catalogue.Evaluate(noise.Key, () => noise.Noise(space.Law), fixedDesign)]
+            ? [Factory.Of(fixedDesign, noise.Noise(space.Law))]
             : catalogue.Undominated(noise.Key, () => noise.Noise(space.Law), errorAtMost);
     }
 
@@ -51,20 +51,22 @@ internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogu
     private double Injected(in OperatingState state) => space.Scenario.Method.InjectedError ?? state.InjectedError;
 }
 
-/// <summary>A noise rounded up to the 2 % grid of the catalogue.</summary>
-/// <param name="Key">Its place on the grid.</param>
+/// <summary>A noise rounded up to the grid of the catalogue in every respect.</summary>
+/// <param name="Key">Its place on the grid; the law is part of it.</param>
 /// <param name="Strength">Noise strength there.</param>
 /// <param name="InjectedError">Injected error there.</param>
-internal readonly record struct NoiseGrid(NoiseKey Key, NoiseStrength Strength, double InjectedError)
+internal readonly record struct RoundedNoise(NoiseKey Key, NoiseStrength Strength, double InjectedError)
 {
-    /// <summary>The grid point at or above a noise in every respect.</summary>
-    public static NoiseGrid RoundedUp(NoiseStrength strength, double injectedError)
+    /// <summary>The grid point at or above a noise.</summary>
+    public static RoundedNoise Of(IScalingLaw law, NoiseStrength strength, double injectedError)
     {
-        NoiseBin x = NoiseBin.RoundedUp(strength.X);
-        NoiseBin z = NoiseBin.RoundedUp(strength.Z);
-        NoiseBin injected = NoiseBin.RoundedUp(injectedError);
-        return new NoiseGrid(
-            new NoiseKey(x.Index, z.Index, injected.Index), new NoiseStrength(x.Value, z.Value), injected.Value);
+        int x = NoiseGrid.BinAbove(strength.X);
+        int z = NoiseGrid.BinAbove(strength.Z);
+        int injected = NoiseGrid.BinAbove(injectedError);
+        return new RoundedNoise(
+            new NoiseKey(x, z, injected, ScalingLaws.All.IndexOf(law)),
+            new NoiseStrength(NoiseGrid.ValueOf(x), NoiseGrid.ValueOf(z)),
+            Math.Min(NoiseGrid.ValueOf(injected), 0.5));
     }
 
     /// <summary>The noise a factory sees.</summary>

@@ -9,7 +9,7 @@ namespace FtEstimate.Sizing;
 public readonly record struct FailureBudget(double Patches, double MagicStates, double Synthesis)
 {
     /// <summary>Failure probability of one shot: 1 − exp(−sum), since the parts are independent and each fault is rare.</summary>
-    public double Total => -Exponential.MinusOne(-(Patches + MagicStates + Synthesis));
+    public double Total => FailureComposition.OfExpected(Patches + MagicStates + Synthesis);
 
     /// <summary>Whether a goal is met.</summary>
     /// <param name="allowed">Failure probability allowed.</param>
@@ -17,10 +17,4 @@ public readonly record struct FailureBudget(double Patches, double MagicStates, 
     public bool Meets(double allowed, bool each) => each
         ? Patches <= allowed && MagicStates <= allowed && Synthesis <= allowed
         : Total <= allowed;
-
-    /// <summary>Expected number of faults in n independent chances of probability p: −n·ln(1−p).</summary>
-    public static double Expected(double chances, double probability) =>
-        probability < 1e-5
-            ? chances * probability * (1 + (probability / 2))
-            : -chances * Math.Log(1 - Math.Min(probability, 1 - 1e-12));
 }

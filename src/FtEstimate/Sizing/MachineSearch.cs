@@ -2,7 +2,6 @@ using FtEstimate.Cycles;
 using FtEstimate.MagicStates;
 using FtEstimate.Noise;
 using FtEstimate.Scenarios;
-using FtEstimate.SurfaceCode;
 
 namespace FtEstimate.Sizing;
 
@@ -16,7 +15,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     private const double SizeStep = 1.1;
 
     /// <summary>Once the tiles take less than this share of the allowed failure, a larger distance buys nothing.</summary>
-    private const double NegligibleShare = 1e-3;
+    private const double NegligibleShare = 1e-2;
 
     /// <summary>At most this many factory counts are tried within one size step.</summary>
     private const int CountsPerSizeStep = 8;
@@ -48,6 +47,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             TrialBase bare = _trial.WithoutFactories(point, layout, distance);
             bool hopeless = bare.Strength.Worse >= 1
                 || bare.Atoms > limits.AtomsAtMost
+                || bare.RunSeconds > limits.ElapsedAtMost
                 || _unbeaten.Beats(bare.Atoms, bare.RunSeconds);
             if (hopeless)
             {
@@ -83,12 +83,15 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             double low = Math.Pow(SizeStep, step);
             double high = low * SizeStep;
             OperatingState state = bare.Point.At(MachineLoad.Of(high, bare.Distance));
-            if (state.Strength.Worse >= 1)
+            bool tooMuch = state.Strength.Worse >= 1
+                || AtomSupply.DemandPerSecond(low, bare.Point, state) > limits.SupplyPerSecond;
+            if (tooMuch)
             {
                 return;
             }
 
             double longestUsefulRun = _trial.RunAtLoad(bare, state.Times.RoundSeconds);
+            double leastRoundSeconds = CandidateTrial.RoundAtLoad(bare, Math.Max(low, bare.TileAtoms));
             bool moreIsUseful = false;
             foreach (Factory factory in factories.At(state, bare.Distance, errorAtMost))
             {
@@ -97,7 +100,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 double most = Math.Floor((high - bare.TileAtoms) / factory.Atoms);
                 double least = Math.Max(1, Math.Floor((low - bare.TileAtoms) / factory.Atoms) + 1);
                 moreIsUseful |= useful > most;
-                TryCounts(bare, factory, least, Math.Min(most, useful));
+                TryCounts(bare, factory, leastRoundSeconds, least, Math.Min(most, useful));
             }
 
             if (!moreIsUseful || bare.Atoms * (high / bare.TileAtoms) > limits.AtomsAtMost * SizeStep)
@@ -107,7 +110,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         }
     }
 
-    private void TryCounts(in TrialBase bare, Factory factory, double least, double most)
+    private void TryCounts(in TrialBase bare, Factory factory, double leastRoundSeconds, double least, double most)
     {
         if (space.Scenario.Method.FactoryCount is { } only)
         {
@@ -123,7 +126,12 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         double stride = Math.Max(1, Math.Ceiling((most - least + 1) / CountsPerSizeStep));
         for (double count = most; count >= least; count -= stride)
         {
-            _trial.Try(bare, factory, (int)count, _unbeaten);
+            double shortestSupply = bare.LeastTStates * factory.RoundsPerOutput / count * leastRoundSeconds;
+            double atoms = bare.Atoms + (factory.Atoms * count);
+            if (!_unbeaten.Beats(atoms, Math.Max(bare.RunSeconds, shortestSupply)))
+            {
+                _trial.Try(bare, factory, (int)count, _unbeaten);
+            }
         }
     }
 

@@ -1,4 +1,3 @@
-using FtEstimate.Noise;
 
 namespace FtEstimate.Sizing;
 

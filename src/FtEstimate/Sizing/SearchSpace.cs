@@ -26,6 +26,9 @@ public sealed record SearchSpace(
     /// <summary>Largest code distance considered.</summary>
     public const int LargestDistance = 99;
 
+    /// <summary>Exposures that shorten the round by less are not tried: the resolution of the search in time.</summary>
+    public const double WorthwhileShortening = 0.005;
+
     /// <summary>The space a scenario leaves open, with the readout in use.</summary>
     /// <param name="scenario">The question; names of law, patch and synthesis are known to exist.</param>
     public static SearchSpace Of(Scenario scenario)
@@ -63,20 +66,25 @@ public sealed record SearchSpace(
             tried.Add((point, point.At(onePatch)));
         }
 
-        // exposures rise, and so do round times: keep each that is quieter than all shorter ones
-        tried.Sort((a, b) => a.State.Times.RoundSeconds.CompareTo(b.State.Times.RoundSeconds));
-        var kept = new List<(OperatingPoint Point, OperatingState State)>();
-        double quietest = double.PositiveInfinity;
-        foreach ((OperatingPoint Point, OperatingState State) candidate in tried)
+        return [.. WorthTrying(tried).Select(kept => kept.Point)];
+    }
+
+    /// <summary>
+    /// From the quietest point to shorter and shorter rounds: each kept point shortens the round of a single patch by at least
+    /// <see cref="WorthwhileShortening"/>, and is the quietest that does. A longer round at more noise is beaten outright.
+    /// </summary>
+    private static IEnumerable<(OperatingPoint Point, OperatingState State)> WorthTrying(
+        List<(OperatingPoint Point, OperatingState State)> tried)
+    {
+        double shortest = double.PositiveInfinity;
+        foreach ((OperatingPoint Point, OperatingState State) candidate in tried.OrderBy(point => point.State.Strength.Mean))
         {
-            if (candidate.State.Strength.Mean < quietest)
+            double round = candidate.State.Times.RoundSeconds;
+            if (round <= (1 - WorthwhileShortening) * shortest)
             {
-                quietest = candidate.State.Strength.Mean;
-                kept.Add(candidate);
+                shortest = round;
+                yield return candidate;
             }
         }
-
-        kept.Reverse();
-        return [.. kept.Select(candidate => candidate.Point)];
     }
 }

@@ -8,22 +8,22 @@ namespace FtEstimate.SurfaceCode;
 public interface IScalingLaw
 {
     /// <summary>The name used in scenario files, such as "published-fit".</summary>
-    public string Name { get; }
+    string Name { get; }
 
     /// <summary>One sentence saying where the law comes from: first author, year, arXiv number.</summary>
-    public string Source { get; }
+    string Source { get; }
 
     /// <summary>The Pauli error probability of every location of the uniform textbook circuit at which x is 1.</summary>
-    public double Threshold { get; }
+    double Threshold { get; }
 
     /// <summary>Probability of any logical error of one patch in one round, 0 to 0.5.</summary>
     /// <param name="x">Noise strength, the same in both bases, 0 or more.</param>
     /// <param name="distance">Code distance; the range is the law's own.</param>
     /// <exception cref="ArgumentOutOfRangeException">The distance is below the law's smallest.</exception>
-    public double LogicalErrorPerRound(double x, int distance);
+    double LogicalErrorPerRound(double x, int distance);
 
     /// <summary>Whether the law rests on data at this point or is carried beyond it.</summary>
-    public LawReach Reach(double x, int distance);
+    LawReach Reach(double x, int distance);
 }
 
 /// <summary>Whether a law rests on data at some point.</summary>

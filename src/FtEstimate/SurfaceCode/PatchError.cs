@@ -1,3 +1,5 @@
+using FtEstimate.Noise;
+
 namespace FtEstimate.SurfaceCode;
 
 /// <summary>The logical error of one patch under noise that may differ between the bases.</summary>
@@ -17,4 +19,20 @@ public static class PatchError
         double larger = PerRound(law, strength, distance + 2);
         return smaller == 0 ? 1 : Math.Min(smaller / larger, double.MaxValue);
     }
+
+    /// <summary>Λ from a distance to the next odd one.</summary>
+    public static Suppression SuppressionFrom(IScalingLaw law, NoiseStrength strength, int distance) =>
+        new(distance, SuppressionFactor(law, strength, distance));
+
+    /// <summary>The noise of a uniform textbook circuit: p over the threshold of the law, the same in both bases.</summary>
+    public static NoiseStrength Uniform(IScalingLaw law, double error) => NoiseStrength.Even(error / law.Threshold);
+}
+
+/// <summary>Λ, always quoted with its two distances.</summary>
+/// <param name="FromDistance">The smaller distance.</param>
+/// <param name="Factor">Logical error per round at the smaller over that at the larger distance.</param>
+public readonly record struct Suppression(int FromDistance, double Factor)
+{
+    /// <summary>The larger distance.</summary>
+    public int ToDistance => FromDistance + 2;
 }

@@ -1,3 +1,5 @@
+using FtEstimate.Noise;
+
 namespace FtEstimate.SurfaceCode;
 
 /// <summary>The smallest patch that is good enough.</summary>

@@ -1,13 +1,16 @@
+using FtEstimate.Machines;
 using FtEstimate.Sizing;
 
 namespace FtEstimate.Tests.Sizing;
 
 public sealed class ElapsedTimeTests
 {
+    private static readonly Running Undisturbed = new(null, 0, 0, 0);
+
     [Fact]
     public void Without_stops_shots_start_run_and_repeat()
     {
-        Interruptions calm = new(null, 1e4, 30, 0.2);
+        Running calm = new(null, 1e4, 30, 0.2);
 
         ElapsedTime elapsed = ElapsedTime.Of(shotSeconds: 800, shots: 5, shotFailureProbability: 0.5, calm);
 
@@ -20,7 +23,7 @@ public sealed class ElapsedTimeTests
     [Fact]
     public void A_retry_risk_of_31_percent_turns_5_1_hours_into_7_4()
     {
-        ElapsedTime elapsed = ElapsedTime.Of(5.1 * 3600, 1, 0.31, Interruptions.None);
+        ElapsedTime elapsed = ElapsedTime.Of(5.1 * 3600, 1, 0.31, Undisturbed);
 
         Assert.Equal(7.4, elapsed.Seconds!.Value / 3600, 0.05);
     }
@@ -29,7 +32,7 @@ public sealed class ElapsedTimeTests
     [Fact]
     public void Nine_shots_of_twelve_hours_take_five_days()
     {
-        ElapsedTime elapsed = ElapsedTime.Of(12.07 * 3600, 9.2, 1 - 0.933, Interruptions.None);
+        ElapsedTime elapsed = ElapsedTime.Of(12.07 * 3600, 9.2, 1 - 0.933, Undisturbed);
 
         Assert.Equal(4.96, elapsed.Seconds!.Value / 86_400, 0.005);
     }
@@ -40,8 +43,8 @@ public sealed class ElapsedTimeTests
     [InlineData(1e300)]
     public void Very_rare_stops_change_nothing(double meanSecondsBetweenStops)
     {
-        ElapsedTime calm = ElapsedTime.Of(3600, 3, 0.1, new Interruptions(null, 600, 60, 0.1));
-        ElapsedTime rare = ElapsedTime.Of(3600, 3, 0.1, new Interruptions(meanSecondsBetweenStops, 600, 60, 0.1));
+        ElapsedTime calm = ElapsedTime.Of(3600, 3, 0.1, new Running(null, 600, 60, 0.1));
+        ElapsedTime rare = ElapsedTime.Of(3600, 3, 0.1, new Running(meanSecondsBetweenStops, 600, 60, 0.1));
 
         // first order: T/2 + R over the time between stops
         Assert.Equal(1, rare.Seconds!.Value / calm.Seconds!.Value, 3e-9);
@@ -51,7 +54,7 @@ public sealed class ElapsedTimeTests
     [Fact]
     public void Rare_stops_cost_half_a_shot_and_a_repair_each()
     {
-        ElapsedTime elapsed = ElapsedTime.Of(1000, 1, 0, new Interruptions(1e7, 300, 0, 0));
+        ElapsedTime elapsed = ElapsedTime.Of(1000, 1, 0, new Running(1e7, 300, 0, 0));
 
         Assert.Equal(1000 + 1e-4 * (500 + 300), elapsed.Seconds!.Value, 1e-5);
     }
@@ -63,7 +66,7 @@ public sealed class ElapsedTimeTests
     public void The_expectation_agrees_with_a_simulation_of_events(double stopsPerShot, double failure)
     {
         const int Runs = 40_000;
-        Interruptions interruptions = new(1000 / stopsPerShot, 150, 20, 0);
+        Running interruptions = new(1000 / stopsPerShot, 150, 20, 0);
         Random random = new(20260703);
         double sum = 0;
         double squares = 0;
@@ -85,7 +88,7 @@ public sealed class ElapsedTimeTests
     [Fact]
     public void More_than_three_stops_in_a_shot_is_no_plan_and_the_needed_quiet_is_told()
     {
-        ElapsedTime elapsed = ElapsedTime.Of(90_000, 1, 0, new Interruptions(20_000, 3600, 0, 0.1));
+        ElapsedTime elapsed = ElapsedTime.Of(90_000, 1, 0, new Running(20_000, 3600, 0, 0.1));
 
         Assert.Equal(5, elapsed.StopsPerShot, 1e-12);
         Assert.NotNull(elapsed.Seconds);
@@ -99,14 +102,14 @@ public sealed class ElapsedTimeTests
     [InlineData(10, 1e6, 1)]
     public void A_run_that_never_ends_has_no_elapsed_time(double shotSeconds, double meanSecondsBetweenStops, double failure)
     {
-        ElapsedTime elapsed = ElapsedTime.Of(shotSeconds, 1, failure, new Interruptions(meanSecondsBetweenStops, 0, 0, 0));
+        ElapsedTime elapsed = ElapsedTime.Of(shotSeconds, 1, failure, new Running(meanSecondsBetweenStops, 0, 0, 0));
 
         Assert.Null(elapsed.Seconds);
         Assert.False(elapsed.FinishesInPractice);
         Assert.True(double.IsFinite(elapsed.StopsPerShot));
     }
 
-    private static double Simulated(double shotSeconds, double failure, Interruptions interruptions, Random random)
+    private static double Simulated(double shotSeconds, double failure, Running interruptions, Random random)
     {
         double clock = 0;
         do
@@ -115,7 +118,7 @@ public sealed class ElapsedTimeTests
             double untilStop = Exponential(interruptions, random);
             while (untilStop < shotSeconds)
             {
-                clock += untilStop + interruptions.SecondsToRestart;
+                clock += untilStop + interruptions.RestartSeconds;
                 untilStop = Exponential(interruptions, random);
             }
 
@@ -125,6 +128,6 @@ public sealed class ElapsedTimeTests
         return clock;
     }
 
-    private static double Exponential(Interruptions interruptions, Random random) =>
+    private static double Exponential(Running interruptions, Random random) =>
         -interruptions.MeanSecondsBetweenStops!.Value * Math.Log(1 - random.NextDouble());
 }

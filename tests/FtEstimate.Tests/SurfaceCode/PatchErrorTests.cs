@@ -1,3 +1,4 @@
+using FtEstimate.Noise;
 using FtEstimate.SurfaceCode;
 
 namespace FtEstimate.Tests.SurfaceCode;

@@ -1,3 +1,4 @@
+using FtEstimate.Noise;
 using FtEstimate.SurfaceCode;
 
 namespace FtEstimate.Tests.SurfaceCode;
@@ -15,7 +16,7 @@ public sealed class RequiredDistanceTests
     [InlineData(3e-3, 31, 43, 53, 65)]
     public void Textbook_distances_meet_ties_exactly(double error, int for1e9, int for1e12, int for1e15, int for1e18)
     {
-        NoiseStrength strength = NoiseStrength.Uniform(ScalingLaws.Textbook, error);
+        NoiseStrength strength = PatchError.Uniform(ScalingLaws.Textbook, error);
 
         Assert.Equal(
             [for1e9, for1e12, for1e15, for1e18],
@@ -31,7 +32,7 @@ public sealed class RequiredDistanceTests
     [InlineData(1e-18, 39)]
     public void Published_fit_distances_agree_with_an_exponential_fit_of_the_counts(double target, int expected)
     {
-        NoiseStrength strength = NoiseStrength.Uniform(ScalingLaws.PublishedFit, 1e-3);
+        NoiseStrength strength = PatchError.Uniform(ScalingLaws.PublishedFit, 1e-3);
 
         int distance = RequiredDistance.For(ScalingLaws.PublishedFit, strength, target)!.Value;
 

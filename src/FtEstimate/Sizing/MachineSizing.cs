@@ -1,0 +1,109 @@
+using System.Collections.Immutable;
+using FtEstimate.MagicStates;
+using FtEstimate.Scenarios;
+
+namespace FtEstimate.Sizing;
+
+/// <summary>Sizes the machine a scenario asks for. Exact on its grids, repeatable, and fast: planning calls it thousands of times.</summary>
+/// <param name="catalogue">Factories already evaluated, shared between calls; safe for several threads.</param>
+public sealed class MachineSizing(FactoryCatalogue catalogue)
+{
+    private static readonly LogicStyle[] Styles = [LogicStyle.LatticeSurgery, LogicStyle.Transversal];
+
+    /// <summary>The preferred machine, the unbeaten ones beside it, or why there is none.</summary>
+    public SizingResult Find(Scenario scenario)
+    {
+        SearchSpace space = SearchSpace.Of(scenario);
+        SearchLimits limits = SearchLimits.Of(scenario);
+        FactoryChoice factories = new(space, catalogue);
+        var perStyle = new List<IReadOnlyList<Candidate>>();
+        foreach (LogicStyle style in Styles)
+        {
+            IReadOnlyList<Candidate> found = new MachineSearch(space, factories, limits, style).Run();
+            if (found.Count > 0)
+            {
+                perStyle.Add(found);
+            }
+        }
+
+        if (perStyle.Count == 0)
+        {
+            return new SizingResult(space, null, null, [], NoAnswerFinder.Explain(space, factories, limits));
+        }
+
+        MachineDetail detail = new(space, factories);
+        SizedMachine[] picks = [.. perStyle.Select(found => detail.Of(Preferred(found, scenario.Goal.Prefer)))];
+        Candidate best = Preferred([.. perStyle.Select(found => Preferred(found, scenario.Goal.Prefer))], scenario.Goal.Prefer);
+        SizedMachine chosen = picks.First(pick => pick.Layout == best.Layout && pick.Atoms.Total == best.Atoms);
+        UnbeatenSet merged = new();
+        foreach (Candidate candidate in perStyle.SelectMany(found => found))
+        {
+            merged.Offer(candidate);
+        }
+
+        return new SizingResult(
+            space,
+            chosen,
+            picks.FirstOrDefault(pick => pick != chosen),
+            [.. TradeOff.Thin(merged.Members, best).Select(detail.Of)],
+            null);
+    }
+
+    /// <summary>The candidate with the smallest preferred measure; ties go to fewer atoms, then to the shorter run.</summary>
+    internal static Candidate Preferred(IReadOnlyList<Candidate> candidates, Preference preference)
+    {
+        Candidate best = candidates[0];
+        foreach (Candidate candidate in candidates)
+        {
+            double difference = Measure(candidate, preference) - Measure(best, preference);
+            if (difference < 0 || (difference == 0 && candidate.Atoms < best.Atoms))
+            {
+                best = candidate;
+            }
+        }
+
+        return best;
+    }
+
+    /// <summary>What a preference wants small.</summary>
+    internal static double Measure(in Candidate candidate, Preference preference) => preference switch
+    {
+        Preference.FewestAtoms => candidate.Atoms,
+        Preference.ShortestRun => candidate.RunSeconds,
+        _ => candidate.Atoms * candidate.RunSeconds,
+    };
+}
+
+/// <summary>Picks the few unbeaten machines a reader wants to see.</summary>
+internal static class TradeOff
+{
+    /// <summary>Rows shown at most.</summary>
+    private const int Rows = 12;
+
+    /// <summary>Spreads the rows evenly over the logarithm of the run time; ends and the preferred machine stay.</summary>
+    public static ImmutableArray<Candidate> Thin(IReadOnlyList<Candidate> unbeaten, in Candidate preferred)
+    {
+        if (unbeaten.Count <= Rows)
+        {
+            return [.. unbeaten];
+        }
+
+        double longest = Math.Log(unbeaten[0].RunSeconds);
+        double shortest = Math.Log(unbeaten[^1].RunSeconds);
+        var kept = ImmutableArray.CreateBuilder<Candidate>(Rows + 1);
+        int lastSlot = -1;
+        for (int i = 0; i < unbeaten.Count; i++)
+        {
+            double place = (longest - Math.Log(unbeaten[i].RunSeconds)) / (longest - shortest);
+            int slot = (int)Math.Floor(place * (Rows - 1));
+            bool isPreferred = unbeaten[i] == preferred;
+            if (slot > lastSlot || isPreferred || i == unbeaten.Count - 1)
+            {
+                kept.Add(unbeaten[i]);
+                lastSlot = Math.Max(slot, lastSlot);
+            }
+        }
+
+        return kept.ToImmutable();
+    }
+}
