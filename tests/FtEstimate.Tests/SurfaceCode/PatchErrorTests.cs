@@ -22,7 +22,7 @@ public sealed class PatchErrorTests
 
     [Fact]
     public void A_factor_scales_both_strengths() =>
-        Assert.Equal(new NoiseStrength(0.2, 0.4), new NoiseStrength(0.1, 0.2).Times(2));
+        Assert.Equal(new NoiseStrength(0.2, 0.4), new NoiseStrength(0.1, 0.2) * 2);
 
     [Fact]
     public void Suppression_stays_a_number_without_noise() =>

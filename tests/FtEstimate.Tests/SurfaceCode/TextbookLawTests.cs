@@ -36,7 +36,7 @@ public sealed class TextbookLawTests
     [InlineData(27)]
     public void Suppression_is_10_at_one_tenth_of_threshold(int distance)
     {
-        Suppression suppression = PatchError.Uniform(Law, 1e-3).Suppression(Law, distance);
+        Suppression suppression = PatchError.SuppressionFrom(Law, PatchError.Uniform(Law, 1e-3), distance);
 
         Assert.Equal(10, suppression.Factor, 1e-9);
         Assert.Equal((distance, distance + 2), (suppression.FromDistance, suppression.ToDistance));
