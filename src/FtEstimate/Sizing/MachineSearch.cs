@@ -18,7 +18,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     private const double NegligibleShare = 1e-2;
 
     /// <summary>At most this many factory counts are tried within one size step.</summary>
-    private const int CountsPerSizeStep = 8;
+    private const int CountsPerSizeStep = 3;
 
     private readonly CandidateTrial _trial = new(space, factories, limits);
     private readonly UnbeatenSet _unbeaten = new();
@@ -76,8 +76,8 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             return;
         }
 
-        double allowed = limits.Each ? limits.FailureAtMost : limits.FailureAtMost - bare.PatchFailure;
-        double errorAtMost = allowed / bare.LeastTStates;
+        // the same for all layouts and distances, so that they share the catalogue's memory
+        double errorAtMost = limits.FailureAtMost / bare.LeastTStates;
         for (int step = SizeStepOf(bare.TileAtoms); ; step++)
         {
             double low = Math.Pow(SizeStep, step);
@@ -123,16 +123,26 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             return;
         }
 
+        if (least > most || Beaten(bare, factory, leastRoundSeconds, least, most))
+        {
+            return;
+        }
+
         double stride = Math.Max(1, Math.Ceiling((most - least + 1) / CountsPerSizeStep));
         for (double count = most; count >= least; count -= stride)
         {
-            double shortestSupply = bare.LeastTStates * factory.RoundsPerOutput / count * leastRoundSeconds;
-            double atoms = bare.Atoms + (factory.Atoms * count);
-            if (!_unbeaten.Beats(atoms, Math.Max(bare.RunSeconds, shortestSupply)))
+            if (!Beaten(bare, factory, leastRoundSeconds, count, count))
             {
                 _trial.Try(bare, factory, (int)count, _unbeaten);
             }
         }
+    }
+
+    /// <summary>Whether even the atoms of the least and the supply of the most of so many factories are beaten.</summary>
+    private bool Beaten(in TrialBase bare, Factory factory, double leastRoundSeconds, double least, double most)
+    {
+        double shortestSupply = bare.LeastTStates * factory.RoundsPerOutput / most * leastRoundSeconds;
+        return _unbeaten.Beats(bare.Atoms + (factory.Atoms * least), Math.Max(bare.RunSeconds, shortestSupply));
     }
 
     private static int SizeStepOf(double sites) => (int)Math.Floor(Math.Log(sites) / Math.Log(SizeStep));
