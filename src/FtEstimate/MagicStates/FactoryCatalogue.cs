@@ -54,8 +54,10 @@ public sealed class FactoryCatalogue
     /// </remarks>
     /// <param name="noise">The noise.</param>
     /// <param name="errorAtMost">Largest useful output error, above 0.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The error is not above 0.</exception>
     public static ImmutableArray<Factory> Undominated(FactoryNoise noise, double errorAtMost)
     {
+        ArgumentOutOfRangeException.ThrowIfNegativeOrZero(errorAtMost);
         double floor = ErrorThatBuysNothing * errorAtMost;
         GridEvaluation grid = new(noise);
         FactoryFront front = new(floor);
@@ -88,8 +90,11 @@ public sealed class FactoryCatalogue
     /// <param name="errorAtMost">
     /// Largest useful output error, above 0. Since it is rounded up, the result may hold designs with up to ten times that error.
     /// </param>
+    /// <exception cref="ArgumentOutOfRangeException">The error is not above 0.</exception>
     public ImmutableArray<Factory> Undominated(NoiseKey key, Func<FactoryNoise> noise, double errorAtMost)
     {
+        ArgumentOutOfRangeException.ThrowIfNegativeOrZero(errorAtMost);
+
         // 1e-12 must not become 1e-11 by rounding
         int exponent = (int)Math.Ceiling(Math.Log10(errorAtMost) - 1e-9);
         return _found.GetOrAdd(
