@@ -45,6 +45,10 @@ public sealed record KeyDefinition(
     /// <summary>The largest number allowed, in the key's unit.</summary>
     public double Upper => Kind == ValueKind.Probability ? Math.Min(High, 1) : High;
 
+    /// <summary>A number in the key's unit, in SI units.</summary>
+    // 10 µs are 10/1e6 s: 10 · 1e-6 would be rounded twice and print as 9.999999999999999E-06
+    public double InSi(double value) => ToSi < 1 ? value / Math.Round(1 / ToSi) : value * ToSi;
+
     /// <summary>Whether a number, in the key's unit, may stand here; never for NaN and infinities.</summary>
     public bool Accepts(double value) =>
         value >= Low && value <= Upper
@@ -103,6 +107,9 @@ public sealed record TableDefinition(
     string? SelectedBy = null,
     string? SelectedWhen = null)
 {
+    /// <summary>Where a key of this table stands, such as "machine.gates.cz_error"; for tables without a star.</summary>
+    public string PathOf(KeyDefinition key) => Path.Length == 0 ? key.Name : $"{Path}.{key.Name}";
+
     /// <summary>The key of this name, or null.</summary>
     public KeyDefinition? Find(string name)
     {

@@ -1,4 +1,6 @@
 using System.Collections.Immutable;
+using FtEstimate.SurfaceCode;
+using FtEstimate.Workloads;
 
 namespace FtEstimate.Scenarios.Keys;
 
@@ -11,7 +13,7 @@ public static class MethodKeys
         ValueKind.Text,
         "The law from physical to logical errors.",
         DefaultText: "published-fit",
-        Choices: ["published-fit", "textbook"]);
+        Choices: [.. ScalingLaws.All.Select(law => law.Name)]);
 
     /// <summary>Atoms per tile.</summary>
     public static readonly KeyDefinition Patch = new(
@@ -19,7 +21,7 @@ public static class MethodKeys
         ValueKind.Text,
         "Atoms of a tile of code distance d: bare, as in Litinski 2019, or with spacing.",
         DefaultText: "2d^2-1",
-        Choices: ["2d^2-1", "2d^2", "2(d+1)^2"]);
+        Choices: [.. PatchLayout.All.Select(layout => layout.Name)]);
 
     /// <summary>How logic is done.</summary>
     public static readonly KeyDefinition Style = new(
@@ -67,7 +69,7 @@ public static class MethodKeys
         ValueKind.Text,
         "How rotations are made from T gates.",
         DefaultText: "repeat-until-success",
-        Choices: ["ross", "repeat-until-success", "mixed-fallback"]);
+        Choices: [.. RotationSynthesis.All.Select(method => method.Name)]);
 
     /// <summary>Routing patches in the transversal style.</summary>
     public static readonly KeyDefinition RoutingFraction = new(

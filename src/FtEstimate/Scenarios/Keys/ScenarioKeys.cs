@@ -20,6 +20,10 @@ public static class ScenarioKeys
         .. WorkloadKeys.Tables,
     ];
 
+    /// <summary>The names that may stand at the top of a scenario file: its keys and its tables.</summary>
+    public static ImmutableArray<string> TopNames { get; } =
+        [GoalKeys.Title.Name, GoalKeys.Goal.Path, MethodKeys.Method.Path, MachineKeys.Top.Path, WorkloadKeys.Top.Path];
+
     /// <summary>The tables that may stand at a path: several when a key such as "kind" selects one, none when the path is unknown.</summary>
     /// <param name="path">A path such as "machine.readout.shelve-one".</param>
     public static ImmutableArray<TableDefinition> At(string path)

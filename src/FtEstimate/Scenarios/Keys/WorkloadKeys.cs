@@ -55,7 +55,7 @@ public static class WorkloadKeys
 
     /// <summary>Bits of the number to factor.</summary>
     public static readonly KeyDefinition Bits = new(
-        "bits", ValueKind.Whole, "Bits of the number to factor.", Low: 8, High: 1_000_000, Required: true);
+        "bits", ValueKind.Whole, "Bits of the number to factor.", Low: 16, High: 1_000_000, Required: true);
 
     /// <summary>Rows of the lattice.</summary>
     public static readonly KeyDefinition Rows = new(
@@ -79,7 +79,7 @@ public static class WorkloadKeys
 
     /// <summary>Evolution time.</summary>
     public static readonly KeyDefinition Time = new(
-        "time_in_inverse_coupling", ValueKind.Positive, "Evolution time in units of 1/J.", Required: true);
+        "time_in_inverse_coupling", ValueKind.Positive, "Evolution time in units of 1/J; the coupling is J.", Required: true);
 
     /// <summary>Product-formula error.</summary>
     public static readonly KeyDefinition TrotterError = new(
