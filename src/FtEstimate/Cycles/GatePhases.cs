@@ -4,8 +4,9 @@ using FtEstimate.Machines;
 namespace FtEstimate.Cycles;
 
 /// <summary>
-/// Reset, one-qubit layers and the four CZ layers. The CZ-native circuit needs four one-qubit layers: with the hook-safe order every data atom
-/// meets check types A, B, B, A, so its frame changes before, after the first, after the third and after the last layer (derived in docs/method.md).
+/// Reset, one-qubit layers and the four CZ layers. The CZ-native circuit takes four one-qubit layers: with the hook-safe order every data atom
+/// meets check types A, B, B, A, so its frame changes before, after the first, after the third and after the last layer, and it waits through the
+/// readout in its plain frame (derived in docs/method.md).
 /// </summary>
 public static class GatePhases
 {
@@ -50,7 +51,7 @@ public static class GatePhases
             string number = (layer + 1).ToString(System.Globalization.CultureInfo.InvariantCulture);
             if (layer is 1 or 3)
             {
-                rules.Add(OneQubitLayer($"One-qubit gates before layer {number}", gates));
+                rules.Add(OneQubitLayer($"One-qubit gates before layer {number}", gates) with { Work = WorkKind.DataAtoms });
             }
 
             switch (array.Reach)
@@ -87,16 +88,33 @@ public static class GatePhases
     internal static PhaseRule OneQubitLayer(string name, Gates gates) =>
         new(name, CyclePart.Preparation, WorkKind.AllAtoms, gates.OneQubitAtOnce, gates.OneQubitSeconds, gates.OneQubitSeconds, 1, DataState.Waiting);
 
-    /// <summary>A leg: all checks in one go without a handoff, or group by group with a pick-up and a drop each.</summary>
+    /// <summary>
+    /// A leg: all checks in one go without a handoff, or group by group with a pick-up and a drop each. With one deflector pair the two check types
+    /// take turns in the inner legs, where their ways differ, and the type at rest is put down meanwhile.
+    /// </summary>
     private static PhaseRule Move(string name, ArrayGeometry geometry, MovedAtoms moved, int leg)
     {
         double seconds = MoveTime.Seconds(
             moved.Profile, Legs[leg] * geometry.PitchMetres, moved.PeakAccelerationMetresPerSecondSquared);
+        double withHandoffs = seconds + (2 * moved.HandoffSeconds);
         bool inner = leg is > 0 and < 4;
-        double turns = inner && !moved.CheckGridsMoveTogether ? 2 : 1;
-        return new(
-            name, CyclePart.Gates, WorkKind.CheckAtoms, moved.MovedAtOnce,
-            turns * seconds, turns * (seconds + (2 * moved.HandoffSeconds)), 1, DataState.InGates);
+        if (inner && !moved.CheckGridsMoveTogether)
+        {
+            return new(
+                name, CyclePart.Gates, WorkKind.HalfOfCheckAtoms, moved.MovedAtOnce, 2 * withHandoffs, 2 * withHandoffs, 1, DataState.InGates);
+        }
+
+        double whole = moved.CheckGridsMoveTogether ? seconds : seconds + moved.HandoffSeconds;
+        return new(name, CyclePart.Gates, WorkKind.CheckAtoms, moved.MovedAtOnce, whole, withHandoffs, 1, DataState.InGates);
+    }
+
+    /// <summary>The way of an extra atom to its data atom, or back, picked up and put down.</summary>
+    internal static PhaseRule ProbeMove(string name, ArrayGeometry geometry, MovedAtoms moved)
+    {
+        double seconds = MoveTime.Seconds(
+            moved.Profile, Legs[0] * geometry.PitchMetres, moved.PeakAccelerationMetresPerSecondSquared)
+            + (2 * moved.HandoffSeconds);
+        return new(name, CyclePart.Gates, WorkKind.CheckAtoms, moved.MovedAtOnce, seconds, seconds, 1, DataState.InGates);
     }
 
     /// <summary>One pick-up or drop per round; in groups it is charged with every leg instead.</summary>

@@ -5,7 +5,7 @@ namespace FtEstimate.Cycles;
 
 /// <summary>
 /// The work of finding lost data atoms, spread over the rounds between two looks. A swap merges with the last CZ layer and adds one more
-/// (a CNOT and a swap make two CNOTs); an extra atom that probes each data atom costs two CZ layers and a readout of its own.
+/// (a CNOT and a swap make two CNOTs); an extra atom that probes each data atom comes and goes, and costs two CZ layers and a readout of its own.
 /// </summary>
 public static class LossCheckPhases
 {
@@ -48,6 +48,12 @@ public static class LossCheckPhases
         rules.Add(oneQubit with { Part = CyclePart.LossCheck, PerRound = 2 * share });
         if (method == LossCheckMethod.ExtraCheck)
         {
+            if (array.Reach is MovedAtoms { LayerSecondsAsStated: null } carried)
+            {
+                PhaseRule way = GatePhases.ProbeMove("Loss check: probe atoms come and go", array.Geometry, carried);
+                rules.Add(way with { Part = CyclePart.LossCheck, PerRound = 2 * share, Data = DataState.Waiting });
+            }
+
             foreach (PhaseRule phase in readout)
             {
                 DataState data = phase.Data == DataState.Beside ? DataState.Waiting : phase.Data;

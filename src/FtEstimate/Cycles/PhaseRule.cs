@@ -27,6 +27,8 @@ public sealed record PhaseRule(
             WorkKind.Pairs => load.PairsPerLayer,
             WorkKind.Checks => load.CheckSites,
             WorkKind.CheckAtoms => load.CheckSites * atomsPerCheck,
+            WorkKind.HalfOfCheckAtoms => load.CheckSites * atomsPerCheck / 2,
+            WorkKind.DataAtoms => load.DataAtoms,
             WorkKind.AllAtoms => load.DataAtoms + (load.CheckSites * atomsPerCheck),
             WorkKind.Everything => 1,
             _ => throw new InvalidOperationException($"unknown kind of work {Work}"),
@@ -71,6 +73,12 @@ public enum WorkKind
 
     /// <summary>Check atoms.</summary>
     CheckAtoms,
+
+    /// <summary>Check atoms of one of the two types.</summary>
+    HalfOfCheckAtoms,
+
+    /// <summary>Data atoms.</summary>
+    DataAtoms,
 
     /// <summary>Data and check atoms.</summary>
     AllAtoms,

@@ -63,7 +63,7 @@ public sealed class SyndromeCycle
         {
             double goes = rule.Goes(load, atomsPerCheck);
             sum.Add(rule.Data, rule.SecondsFor(goes));
-            groups |= goes > 1 && rule is { Work: WorkKind.CheckAtoms, Data: DataState.InGates };
+            groups |= goes > 1 && rule is { Work: WorkKind.CheckAtoms or WorkKind.HalfOfCheckAtoms, Data: DataState.InGates };
         }
 
         double path = sum.InGates + sum.Waiting + sum.Shelved;

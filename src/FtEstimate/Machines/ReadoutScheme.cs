@@ -12,6 +12,9 @@ public abstract record ReadoutScheme(string Name, Detector Detector, double Reco
     /// <summary>Sets of checks that take turns, at least 1.</summary>
     public virtual int Banks => 1;
 
+    /// <summary>Sets of checks held in traps, at least 1.</summary>
+    public virtual int CheckSets => Banks;
+
     /// <summary>Atoms that make up one check, at least 1.</summary>
     public virtual int AtomsPerCheck => 1;
 }
@@ -96,6 +99,9 @@ public sealed record MovedApart(
 
     /// <inheritdoc/>
     public override int Banks => BankCount;
+
+    /// <summary>An exchange needs the fresh set beside the one in use.</summary>
+    public override int CheckSets => ExchangeSeconds is null ? BankCount : Math.Max(2, BankCount);
 }
 
 /// <summary>Checks are read where they are and the data atoms are not protected.</summary>

@@ -63,14 +63,15 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         double everyRounds = Array.Coherence.LossCheck.EveryRounds;
         double look = Cycle.Reading.LossPerLook;
         double looksAtData = _lossCheck == LossCheckMethod.Swap ? 1 / everyRounds : 0;
-        double looksAtChecks = 1 + (_lossCheck == LossCheckMethod.ExtraCheck ? 1 / everyRounds : 0);
+        double looksAtChecks = 1 - looksAtData + (_lossCheck == LossCheckMethod.ExtraCheck ? 1 / everyRounds : 0);
+        double extraGates = _gate.LossPerAtom * LossCheckPhases.ExtraLayers(_lossCheck) / everyRounds;
         double lossPerMove = Array.Reach is MovedAtoms moved ? moved.LossPerMove : 0;
         double trips = Cycle.Scheme is MovedApart ? 2 : 0;
         double legs = Array.Reach is MovedAtoms ? GatePhases.MovesPerCheck : 0;
         return new AtomLoss(
             _gate.LossPerAtom,
-            vacuum + (look * looksAtData),
-            vacuum + (look * looksAtChecks) + ((legs + trips) * lossPerMove));
+            vacuum + (look * looksAtData) + extraGates,
+            vacuum + (look * looksAtChecks) + extraGates + ((legs + trips) * lossPerMove));
     }
 
     private PauliChannel ShelvedWaiting(in CycleTimes times) => Cycle.Scheme is Shelved shelved
@@ -102,8 +103,9 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         if (Array.Reach is MovedAtoms { HandoffInfidelity: > 0 } moved)
         {
             double handoff = Gates.PauliErrorOfOneQubit(moved.HandoffInfidelity);
-            double handoffs = times.ChecksMoveInGroups ? 2 * GatePhases.MovesPerCheck : 2;
-            NoiseStrength each = times.ChecksMoveInGroups ? Weights.CheckInSequence(handoff) : Weights.CheckGate(handoff);
+            bool everyLeg = times.ChecksMoveInGroups || !moved.CheckGridsMoveTogether;
+            double handoffs = everyLeg ? 2 * GatePhases.MovesPerCheck : 2;
+            NoiseStrength each = everyLeg ? Weights.CheckInSequence(handoff) : Weights.CheckGate(handoff);
             sink.Add("Handoffs of checks", handoff, handoffs, each * handoffs);
         }
     }
@@ -159,8 +161,10 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         }
         else
         {
-            // nobody tells the decoder: a lost atom counts as an error of its gate
-            sink.Add("Loss of data atoms, not told", data, SyndromeCycle.Layers, Weights.Cz(data));
+            // nobody tells the decoder: a lost atom counts as an error of its gate, and as a random qubit in the rounds until it is replaced
+            double roundsUntilReplaced = (Array.Coherence.LossCheck.EveryRounds - 1) / 2;
+            NoiseStrength random = Weights.DataEvent(PauliChannel.Depolarising(0.75 * SyndromeCycle.Layers * data * roundsUntilReplaced));
+            sink.Add("Loss of data atoms, not told", data, SyndromeCycle.Layers, Weights.Cz(data) + random);
             sink.Add("Loss of check atoms, not told", check, SyndromeCycle.Layers, Weights.Cz(check));
         }
     }

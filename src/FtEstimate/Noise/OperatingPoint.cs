@@ -17,7 +17,7 @@ public abstract class OperatingPoint
     {
     }
 
-    /// <summary>Check atoms held for each check site: banks times atoms per check.</summary>
+    /// <summary>Check atoms held for each check site: sets of checks times atoms per check.</summary>
     public abstract int CheckAtomsPerSite { get; }
 
     /// <summary>Check atoms in use in one round for each check site.</summary>
@@ -51,7 +51,7 @@ public sealed class AtomOperatingPoint(AtomNoise noise, Control control) : Opera
     public AtomNoise Noise { get; } = noise;
 
     /// <inheritdoc/>
-    public override int CheckAtomsPerSite => CheckAtomsInUse * Noise.Cycle.Scheme.Banks;
+    public override int CheckAtomsPerSite => CheckAtomsInUse * Noise.Cycle.Scheme.CheckSets;
 
     /// <inheritdoc/>
     public override int CheckAtomsInUse => Noise.Cycle.Scheme.AtomsPerCheck;
@@ -79,8 +79,18 @@ public sealed class AtomOperatingPoint(AtomNoise noise, Control control) : Opera
 
     /// <inheritdoc/>
     public override double ReactionSeconds(int distance) =>
-        Noise.Cycle.Reading.ExposureSeconds + Noise.Cycle.Scheme.Detector.TransferSeconds
+        BeforeExposureSeconds + Noise.Cycle.Reading.ExposureSeconds + Noise.Cycle.Scheme.Detector.TransferSeconds
         + (distance * control.DecodeSecondsPerRound) + control.FeedForwardSeconds;
+
+    /// <summary>What comes before a single patch can be exposed: the others shelved, or the way to the readout zone.</summary>
+    private double BeforeExposureSeconds => Noise.Cycle.Scheme switch
+    {
+        Shelved shelved => shelved.ShelveSeconds + shelved.SelectSeconds,
+        MovedApart { ExchangeSeconds: { } seconds } => seconds,
+        MovedApart { DistanceMetres: { } metres } when Noise.Array.Reach is MovedAtoms moved =>
+            MoveTime.Seconds(moved.Profile, metres, moved.PeakAccelerationMetresPerSecondSquared) + (2 * moved.HandoffSeconds),
+        _ => 0,
+    };
 
     /// <inheritdoc/>
     public override double PatchMoveSeconds(int distance)

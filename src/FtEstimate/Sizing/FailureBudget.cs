@@ -15,6 +15,6 @@ public readonly record struct FailureBudget(double Patches, double MagicStates, 
     /// <param name="allowed">Failure probability allowed.</param>
     /// <param name="each">Whether each part may use all of it on its own, as some papers count.</param>
     public bool Meets(double allowed, bool each) => each
-        ? Patches <= allowed && MagicStates <= allowed && Synthesis <= allowed
+        ? FailureComposition.OfExpected(Math.Max(Patches, Math.Max(MagicStates, Synthesis))) <= allowed
         : Total <= allowed;
 }

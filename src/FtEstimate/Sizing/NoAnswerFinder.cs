@@ -46,7 +46,7 @@ internal static class NoAnswerFinder
         }),
     ];
 
-    /// <summary>The factor on all noise at which some machine meets the goal, to three digits; null when none does.</summary>
+    /// <summary>The factor on all noise at which some machine meets the goal, to one per cent; null when none does.</summary>
     private static double? FactorNeeded(SearchSpace space, FactoryChoice factories, SearchLimits limits)
     {
         if (!Feasible(LowestNoiseFactor))
@@ -80,16 +80,12 @@ internal static class NoAnswerFinder
 
     private static Candidate? Closest(SearchSpace space, FactoryChoice factories, SearchLimits limits)
     {
-        foreach (LogicStyle style in (LogicStyle[])[LogicStyle.LatticeSurgery, LogicStyle.Transversal])
-        {
-            IReadOnlyList<Candidate> found = new MachineSearch(space, factories, limits, style).Run();
-            if (found.Count > 0)
-            {
-                return MachineSizing.Preferred(found, space.Scenario.Goal.Prefer);
-            }
-        }
-
-        return null;
+        List<Candidate> found =
+        [
+            .. new MachineSearch(space, factories, limits, LogicStyle.LatticeSurgery).Run(),
+            .. new MachineSearch(space, factories, limits, LogicStyle.Transversal).Run(),
+        ];
+        return found.Count > 0 ? MachineSizing.Preferred(found, space.Scenario.Goal.Prefer) : null;
     }
 
     private static string SentenceFor(
