@@ -20,7 +20,7 @@ internal static class BottomLineSection
     {
         var blocks = ImmutableArray.CreateBuilder<Block>();
         blocks.Add(new Paragraph(Sentence(subject.Space.Scenario, machine), Tone.Strong));
-        AddCautions(blocks, subject, machine);
+        AddCautions(blocks, subject);
         blocks.Add(FigureTable.Of(AnswerFigures.Of(subject.Space, machine), withMeaning: true));
         blocks.Add(new Paragraph("What limits it:"));
         blocks.Add(new BulletList(Limits(subject, machine)));
@@ -30,7 +30,7 @@ internal static class BottomLineSection
     }
 
     /// <summary>The cautions that a reader of the first half page must not miss.</summary>
-    public static void AddCautions(ImmutableArray<Block>.Builder blocks, Subject subject, SizedMachine machine)
+    public static void AddCautions(ImmutableArray<Block>.Builder blocks, Subject subject)
     {
         if (!subject.Cycle.IsPhysical)
         {
@@ -38,7 +38,7 @@ internal static class BottomLineSection
                 "This machine is abstract: its error and round time are stated, and no physical cycle stands behind them.", Tone.Caution));
         }
 
-        if (!machine.Elapsed.FinishesInPractice && subject.Space.Scenario.Machine.Running.MeanSecondsBetweenStops is { } between)
+        if (subject.Machine is { Elapsed.FinishesInPractice: false } machine && subject.Space.Scenario.Machine.Running.MeanSecondsBetweenStops is { } between)
         {
             blocks.Add(new Paragraph(
                 $"This run does not finish in practice. A stop loses the shot, and {Show.Significant(machine.Elapsed.StopsPerShot, 2)} stops are " +
@@ -47,7 +47,7 @@ internal static class BottomLineSection
                 Tone.Caution));
         }
 
-        if (machine.Optics.Fields is > 1 and double fields)
+        if (subject.Machine?.Optics.Fields is > 1 and double fields)
         {
             blocks.Add(new Paragraph(
                 $"The atoms fill {Words.Whole(fields)} optical fields of the stated diameter. No link between fields is modelled.", Tone.Caution));

@@ -69,7 +69,11 @@ internal static class CycleSection
         {
             string part = Words.Part(phase.Part) + (phase.Data == DataState.Beside ? ", beside the gates" : "");
             table.Add(
-                phase.Name, time.Show(phase.StartSeconds), time.Between(phase.StartSeconds, phase.StartSeconds + phase.Seconds), phase.Goes < 1 ? Show.Significant(phase.Goes, 1) : Words.Whole(phase.Goes), part);
+                phase.Name,
+                time.Show(phase.StartSeconds),
+                time.Between(phase.StartSeconds, phase.StartSeconds + phase.Seconds),
+                phase.Goes < 1 ? Show.Significant(phase.Goes, 1) : Words.Whole(phase.Goes),
+                part);
         }
 
         if (cycle.IdleSeconds > 0)

@@ -16,12 +16,7 @@ internal static class NoAnswerSection
         blocks.Add(new Paragraph(
             $"No machine meets the goal: “{subject.Space.Scenario.Workload.Name}” on “{subject.Space.Scenario.Machine.Name}”.", Tone.Strong));
         blocks.Add(new Paragraph(none.Sentence));
-        if (!subject.Cycle.IsPhysical)
-        {
-            blocks.Add(new Paragraph(
-                "This machine is abstract: its error and round time are stated, and no physical cycle stands behind them.", Tone.Caution));
-        }
-
+        BottomLineSection.AddCautions(blocks, subject);
         if (none.Closest is { } closest)
         {
             blocks.Add(new Paragraph("With the limits on atoms, time and supply dropped, this machine comes closest:"));
