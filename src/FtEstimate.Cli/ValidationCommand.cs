@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using System.CommandLine;
-using FtEstimate.Files;
 using FtEstimate.Files.Comparisons;
 using FtEstimate.Reports.Listings;
 

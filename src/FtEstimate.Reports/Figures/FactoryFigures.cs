@@ -27,7 +27,7 @@ internal static class FactoryFigures
             Figure.Of(Name, factory.Name),
             new(Count, machine.FactoryCount),
             new(Atoms, factory.Atoms),
-            new(Injected, space.Scenario.Method.InjectedError ?? machine.State.InjectedError),
+            new(Injected, machine.InjectedError),
             new(OutputError, factory.OutputError),
             new(Accepted, factory.Acceptance),
             new(Rounds, factory.RoundsPerOutput),
