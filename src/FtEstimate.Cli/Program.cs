@@ -1,1 +1,3 @@
-Console.WriteLine("FtEstimate");
+using FtEstimate.Cli;
+
+return await App.RunAsync(args, Console.Out, Console.Error).ConfigureAwait(false);

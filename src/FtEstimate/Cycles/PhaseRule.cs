@@ -34,12 +34,14 @@ public sealed record PhaseRule(
         return count <= AtOnce ? 1 : Math.Ceiling(count / AtOnce);
     }
 
+    /// <summary>Whether the duration is the same for every load.</summary>
+    public bool IsFixed => Work == WorkKind.Everything || double.IsPositiveInfinity(AtOnce);
+
     /// <summary>Seconds per round for a load.</summary>
-    public double Seconds(in MachineLoad load, int atomsPerCheck)
-    {
-        double goes = Goes(load, atomsPerCheck);
-        return PerRound * (goes <= 1 ? SecondsWhole : goes * SecondsPerGo);
-    }
+    public double Seconds(in MachineLoad load, int atomsPerCheck) => SecondsFor(Goes(load, atomsPerCheck));
+
+    /// <summary>Seconds per round for a number of goes.</summary>
+    public double SecondsFor(double goes) => PerRound * (goes <= 1 ? SecondsWhole : goes * SecondsPerGo);
 }
 
 /// <summary>The part of the round a phase belongs to.</summary>

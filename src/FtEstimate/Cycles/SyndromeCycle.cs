@@ -6,16 +6,33 @@ namespace FtEstimate.Cycles;
 /// <summary>
 /// The syndrome round of a machine under one readout scheme and exposure: a list of phases whose durations follow the load.
 /// </summary>
-/// <param name="Scheme">The readout scheme.</param>
-/// <param name="Reading">What one look at a check gives.</param>
-/// <param name="Rules">The phases in order.</param>
-/// <param name="ReadoutBeside">Whether the readout runs beside the next round's gates (a second bank of checks works meanwhile).</param>
-public sealed record SyndromeCycle(
-    ReadoutScheme Scheme,
-    CheckReading Reading,
-    ImmutableArray<PhaseRule> Rules,
-    bool ReadoutBeside)
+public sealed class SyndromeCycle
 {
+    private readonly FixedTimes _fixed;
+    private readonly PhaseRule[] _growing;
+
+    /// <summary>A round made of phases.</summary>
+    /// <param name="scheme">The readout scheme.</param>
+    /// <param name="reading">What one look at a check gives.</param>
+    /// <param name="rules">The phases in order.</param>
+    public SyndromeCycle(ReadoutScheme scheme, CheckReading reading, ImmutableArray<PhaseRule> rules)
+    {
+        Scheme = scheme;
+        Reading = reading;
+        Rules = rules;
+        _fixed = FixedTimes.Of(rules);
+        _growing = [.. Merged(rules.Where(rule => !rule.IsFixed))];
+    }
+
+    /// <summary>The readout scheme.</summary>
+    public ReadoutScheme Scheme { get; }
+
+    /// <summary>What one look at a check gives.</summary>
+    public CheckReading Reading { get; }
+
+    /// <summary>The phases in order.</summary>
+    public ImmutableArray<PhaseRule> Rules { get; }
+
     /// <summary>CZ layers per round of the rotated code.</summary>
     public const int Layers = 4;
 
@@ -33,42 +50,25 @@ public sealed record SyndromeCycle(
             .. readout,
             .. LossCheckPhases.Of(array, scheme, readout),
         ];
-        return new SyndromeCycle(scheme, reading, rules, scheme.Banks > 1);
+        return new SyndromeCycle(scheme, reading, rules);
     }
 
     /// <summary>The durations for a load. No allocation: the sizing asks thousands of times.</summary>
     public CycleTimes Times(in MachineLoad load)
     {
-        double inGates = 0;
-        double waiting = 0;
-        double shelved = 0;
-        double beside = 0;
+        FixedTimes sum = _fixed;
         bool groups = false;
         int atomsPerCheck = Scheme.AtomsPerCheck;
-        foreach (PhaseRule rule in Rules)
+        foreach (PhaseRule rule in _growing)
         {
-            double seconds = rule.Seconds(load, atomsPerCheck);
-            switch (rule.Data)
-            {
-                case DataState.InGates:
-                    inGates += seconds;
-                    groups |= rule.Work == WorkKind.CheckAtoms && rule.Goes(load, atomsPerCheck) > 1;
-                    break;
-                case DataState.Shelved:
-                    shelved += seconds;
-                    break;
-                case DataState.Beside:
-                    beside += seconds;
-                    break;
-                default:
-                    waiting += seconds;
-                    break;
-            }
+            double goes = rule.Goes(load, atomsPerCheck);
+            sum.Add(rule.Data, rule.SecondsFor(goes));
+            groups |= goes > 1 && rule is { Work: WorkKind.CheckAtoms, Data: DataState.InGates };
         }
 
-        double path = inGates + waiting + shelved;
-        double idle = Math.Max(beside - path, 0);
-        return new CycleTimes(path + idle, inGates / Layers, waiting + idle, shelved, groups);
+        double path = sum.InGates + sum.Waiting + sum.Shelved;
+        double idle = Math.Max(sum.Beside - path, 0);
+        return new CycleTimes(path + idle, sum.InGates / Layers, sum.Waiting + idle, sum.Shelved, groups);
     }
 
     /// <summary>The phases for a load, with their starts.</summary>
@@ -94,5 +94,57 @@ public sealed record SyndromeCycle(
         }
 
         return phases.ToImmutable();
+    }
+
+    /// <summary>Phases of the same work, limit and effect on the data as one: four CZ layers cost one look at the load.</summary>
+    private static IEnumerable<PhaseRule> Merged(IEnumerable<PhaseRule> rules) => rules
+        .GroupBy(rule => (rule.Work, rule.AtOnce, rule.Data))
+        .Select(group => group.First() with
+        {
+            SecondsWhole = group.Sum(rule => rule.PerRound * rule.SecondsWhole),
+            SecondsPerGo = group.Sum(rule => rule.PerRound * rule.SecondsPerGo),
+            PerRound = 1,
+        });
+
+    /// <summary>Seconds by what the data atoms do.</summary>
+    private struct FixedTimes
+    {
+        public double InGates;
+        public double Waiting;
+        public double Shelved;
+        public double Beside;
+
+        public static FixedTimes Of(ImmutableArray<PhaseRule> rules)
+        {
+            FixedTimes sum = default;
+            foreach (PhaseRule rule in rules)
+            {
+                if (rule.IsFixed)
+                {
+                    sum.Add(rule.Data, rule.SecondsFor(1));
+                }
+            }
+
+            return sum;
+        }
+
+        public void Add(DataState data, double seconds)
+        {
+            switch (data)
+            {
+                case DataState.InGates:
+                    InGates += seconds;
+                    break;
+                case DataState.Shelved:
+                    Shelved += seconds;
+                    break;
+                case DataState.Beside:
+                    Beside += seconds;
+                    break;
+                default:
+                    Waiting += seconds;
+                    break;
+            }
+        }
     }
 }

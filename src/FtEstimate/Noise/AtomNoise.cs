@@ -23,10 +23,13 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     public ChannelWeights Weights { get; } = weights;
 
     /// <summary>Total strength for given durations; no allocation.</summary>
-    public NoiseStrength Strength(in CycleTimes times)
+    public NoiseStrength Strength(in CycleTimes times) => Strength(times, Loss(times));
+
+    /// <summary>Total strength for given durations and the losses that go with them.</summary>
+    internal NoiseStrength Strength(in CycleTimes times, in AtomLoss loss)
     {
         ChannelSum sum = default;
-        Visit(times, ref sum);
+        Visit(times, loss, ref sum);
         return sum.Total;
     }
 
@@ -34,7 +37,7 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     public ErrorLedger Ledger(in CycleTimes times)
     {
         ChannelList list = new();
-        Visit(times, ref list);
+        Visit(times, Loss(times), ref list);
         return new ErrorLedger([.. list.Channels.OrderByDescending(channel => channel.Strength.Mean)]);
     }
 
@@ -74,13 +77,13 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         ? PauliChannel.Waiting(times.ShelvedSeconds, shelved.ShelvedT1Seconds, shelved.ShelvedT2Seconds)
         : default;
 
-    private void Visit<TSink>(in CycleTimes times, ref TSink sink)
+    private void Visit<TSink>(in CycleTimes times, in AtomLoss loss, ref TSink sink)
         where TSink : struct, IChannelSink
     {
         VisitGates(times, ref sink);
         VisitWaiting(times, ref sink);
         VisitReadout(ref sink);
-        VisitLoss(times, ref sink);
+        VisitLoss(loss, ref sink);
     }
 
     private void VisitGates<TSink>(in CycleTimes times, ref TSink sink)
@@ -143,10 +146,9 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         }
     }
 
-    private void VisitLoss<TSink>(in CycleTimes times, ref TSink sink)
+    private void VisitLoss<TSink>(in AtomLoss loss, ref TSink sink)
         where TSink : struct, IChannelSink
     {
-        AtomLoss loss = Loss(times);
         double lookLater = Cycle.Scheme is MovedApart { ReadInRound: false } ? Cycle.Reading.LossPerLook : 0;
         double data = loss.PerGateSlot + (loss.DataPerRound / SyndromeCycle.Layers);
         double check = loss.PerGateSlot + (Math.Max(loss.CheckPerRound - lookLater, 0) / SyndromeCycle.Layers);

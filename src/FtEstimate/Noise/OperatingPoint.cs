@@ -7,9 +7,8 @@ namespace FtEstimate.Noise;
 /// <summary>Times and noise of a machine of one size.</summary>
 /// <param name="Times">Durations of a round.</param>
 /// <param name="Strength">Noise strength per basis.</param>
-/// <param name="InjectedError">Pauli probability of an injected T state.</param>
 /// <param name="Loss">Where atoms are lost.</param>
-public readonly record struct OperatingState(CycleTimes Times, NoiseStrength Strength, double InjectedError, AtomLoss Loss);
+public readonly record struct OperatingState(CycleTimes Times, NoiseStrength Strength, AtomLoss Loss);
 
 /// <summary>A way to run a machine (readout scheme and exposure chosen): times and noise for every size.</summary>
 public abstract class OperatingPoint
@@ -24,8 +23,17 @@ public abstract class OperatingPoint
     /// <summary>Check atoms in use in one round for each check site.</summary>
     public abstract int CheckAtomsInUse { get; }
 
-    /// <summary>Times and noise for a load; extra waiting of the data atoms per round is added to both.</summary>
-    public abstract OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0);
+    /// <summary>Durations of a round for a load; extra waiting of the data atoms per round lengthens it.</summary>
+    public abstract CycleTimes Times(in MachineLoad load, double extraWaitingSeconds = 0);
+
+    /// <summary>Noise for given durations.</summary>
+    public abstract OperatingState StateOf(in CycleTimes times);
+
+    /// <summary>Times and noise for a load.</summary>
+    public OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0) => StateOf(Times(load, extraWaitingSeconds));
+
+    /// <summary>Pauli probability of an injected T state.</summary>
+    public abstract double InjectedError(in OperatingState state);
 
     /// <summary>From a logical measurement at a distance to the operation that depends on it.</summary>
     public abstract double ReactionSeconds(int distance);
@@ -49,20 +57,25 @@ public sealed class AtomOperatingPoint(AtomNoise noise, Control control) : Opera
     public override int CheckAtomsInUse => Noise.Cycle.Scheme.AtomsPerCheck;
 
     /// <inheritdoc/>
-    public override OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0)
+    public override CycleTimes Times(in MachineLoad load, double extraWaitingSeconds = 0)
     {
         CycleTimes times = Noise.Cycle.Times(load);
-        if (extraWaitingSeconds > 0)
+        return extraWaitingSeconds <= 0 ? times : times with
         {
-            times = times with
-            {
-                RoundSeconds = times.RoundSeconds + extraWaitingSeconds,
-                WaitingSeconds = times.WaitingSeconds + extraWaitingSeconds,
-            };
-        }
-
-        return new OperatingState(times, Noise.Strength(times), Noise.InjectedError(times), Noise.Loss(times));
+            RoundSeconds = times.RoundSeconds + extraWaitingSeconds,
+            WaitingSeconds = times.WaitingSeconds + extraWaitingSeconds,
+        };
     }
+
+    /// <inheritdoc/>
+    public override OperatingState StateOf(in CycleTimes times)
+    {
+        AtomLoss loss = Noise.Loss(times);
+        return new OperatingState(times, Noise.Strength(times, loss), loss);
+    }
+
+    /// <inheritdoc/>
+    public override double InjectedError(in OperatingState state) => Noise.InjectedError(state.Times);
 
     /// <inheritdoc/>
     public override double ReactionSeconds(int distance) =>
@@ -94,11 +107,17 @@ public sealed class AbstractOperatingPoint(AbstractApparatus apparatus, double t
     public override int CheckAtomsInUse => 1;
 
     /// <inheritdoc/>
-    public override OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0) => new(
-        new CycleTimes(apparatus.RoundSeconds + extraWaitingSeconds, apparatus.RoundSeconds / SyndromeCycle.Layers, 0, 0, false),
+    public override CycleTimes Times(in MachineLoad load, double extraWaitingSeconds = 0) => new(
+        apparatus.RoundSeconds + extraWaitingSeconds, apparatus.RoundSeconds / SyndromeCycle.Layers, 0, 0, false);
+
+    /// <inheritdoc/>
+    public override OperatingState StateOf(in CycleTimes times) => new(
+        times,
         NoiseStrength.Even(apparatus.UniformError / threshold),
-        apparatus.UniformError,
         default);
+
+    /// <inheritdoc/>
+    public override double InjectedError(in OperatingState state) => apparatus.UniformError;
 
     /// <inheritdoc/>
     public override double ReactionSeconds(int distance) => apparatus.ReactionSeconds;

@@ -24,6 +24,12 @@ public static class ElementaryFunctions
             return Math.Exp(x) - 1;
         }
 
+        if (Math.Abs(x) < 1e-3)
+        {
+            // waiting errors ask for this case a million times; the next term is below 1e-14 of the first
+            return x * (1 + (x / 2 * (1 + (x / 3 * (1 + (x / 4))))));
+        }
+
         double power = Math.Exp(x);
         return power == 1 ? x : (power - 1) * (x / Math.Log(power));
     }

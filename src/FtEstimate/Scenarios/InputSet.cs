@@ -19,17 +19,22 @@ public sealed record Input(
     double? High = null,
     string? Source = null);
 
-/// <summary>Every input of a scenario by its path; changing one and binding again gives another scenario.</summary>
+/// <summary>Every input of a scenario by its path; changing some and binding again gives another scenario.</summary>
 public sealed class InputSet
 {
-    private readonly ImmutableDictionary<string, Input> _byPath;
+    private readonly Dictionary<string, Input> _byPath;
 
     /// <summary>Collects inputs; a path stands once.</summary>
     /// <param name="inputs">The inputs, in the order of the files.</param>
+    /// <exception cref="ArgumentException">A path stands twice.</exception>
     public InputSet(IEnumerable<Input> inputs)
     {
         InOrder = [.. inputs];
-        _byPath = InOrder.ToImmutableDictionary(input => input.Path, StringComparer.Ordinal);
+        _byPath = new Dictionary<string, Input>(InOrder.Length, StringComparer.Ordinal);
+        foreach (Input input in InOrder)
+        {
+            _byPath.Add(input.Path, input);
+        }
     }
 
     /// <summary>The inputs in the order of the files.</summary>
@@ -38,7 +43,27 @@ public sealed class InputSet
     /// <summary>The input at a path, or null.</summary>
     public Input? Find(string path) => _byPath.GetValueOrDefault(path);
 
-    /// <summary>The same inputs with one number replaced; its range and source are dropped.</summary>
-    public InputSet With(string path, double value) =>
-        new(InOrder.Where(input => input.Path != path).Append(new Input(path, value)));
+    /// <summary>The same inputs with one number replaced, or added; its range and source are dropped.</summary>
+    /// <param name="path">Where the number stands.</param>
+    /// <param name="value">The number, in the unit of its key.</param>
+    public InputSet With(string path, double value) => With([KeyValuePair.Create(path, value)]);
+
+    /// <summary>The same inputs with several numbers replaced, or added; their ranges and sources are dropped.</summary>
+    /// <param name="numbers">Paths and numbers, in the units of their keys.</param>
+    public InputSet With(IReadOnlyCollection<KeyValuePair<string, double>> numbers)
+    {
+        Dictionary<string, double> left = new(numbers, StringComparer.Ordinal);
+        ImmutableArray<Input>.Builder changed = ImmutableArray.CreateBuilder<Input>(InOrder.Length + left.Count);
+        foreach (Input input in InOrder)
+        {
+            changed.Add(left.Remove(input.Path, out double value) ? new Input(input.Path, value) : input);
+        }
+
+        foreach ((string path, double value) in left)
+        {
+            changed.Add(new Input(path, value));
+        }
+
+        return new InputSet(changed);
+    }
 }

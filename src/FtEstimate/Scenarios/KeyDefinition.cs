@@ -20,12 +20,41 @@ public sealed record KeyDefinition(
     string Meaning,
     double ToSi = 1,
     double Low = 0,
-    double High = double.MaxValue,
+    double High = KeyDefinition.Largest,
     bool Required = false,
     double? Default = null,
     string? DefaultText = null,
     ImmutableArray<string> Choices = default,
-    BetterWhen Better = BetterWhen.NoDirection);
+    BetterWhen Better = BetterWhen.NoDirection)
+{
+    /// <summary>No input is larger than this, so that products of inputs stay finite.</summary>
+    public const double Largest = 1e30;
+
+    /// <summary>No input that must be above zero is smaller than this, so that quotients of inputs stay finite.</summary>
+    public const double Smallest = 1e-30;
+
+    /// <summary>The texts allowed; empty: any.</summary>
+    public ImmutableArray<string> Choices { get; } = Choices.IsDefault ? [] : Choices;
+
+    /// <summary>Whether a number stands here.</summary>
+    public bool IsNumber => Kind is not (ValueKind.Text or ValueKind.Flag);
+
+    /// <summary>Whether the number must be above zero.</summary>
+    public bool IsAboveZero => Kind is ValueKind.Positive or ValueKind.PositiveOrBest;
+
+    /// <summary>The largest number allowed, in the key's unit.</summary>
+    public double Upper => Kind == ValueKind.Probability ? Math.Min(High, 1) : High;
+
+    /// <summary>A number in the key's unit, in SI units.</summary>
+    // 10 µs are 10/1e6 s: 10 · 1e-6 would be rounded twice and print as 9.999999999999999E-06
+    public double InSi(double value) => ToSi < 1 ? value / Math.Round(1 / ToSi) : value * ToSi;
+
+    /// <summary>Whether a number, in the key's unit, may stand here; never for NaN and infinities.</summary>
+    public bool Accepts(double value) =>
+        value >= Low && value <= Upper
+        && (!IsAboveZero || value >= Smallest)
+        && (Kind != ValueKind.Whole || double.IsInteger(value));
+}
 
 /// <summary>What may stand at a key.</summary>
 public enum ValueKind
@@ -76,4 +105,22 @@ public sealed record TableDefinition(
     string Meaning,
     ImmutableArray<KeyDefinition> Keys,
     string? SelectedBy = null,
-    string? SelectedWhen = null);
+    string? SelectedWhen = null)
+{
+    /// <summary>Where a key of this table stands, such as "machine.gates.cz_error"; for tables without a star.</summary>
+    public string PathOf(KeyDefinition key) => Path.Length == 0 ? key.Name : $"{Path}.{key.Name}";
+
+    /// <summary>The key of this name, or null.</summary>
+    public KeyDefinition? Find(string name)
+    {
+        foreach (KeyDefinition key in Keys)
+        {
+            if (key.Name == name)
+            {
+                return key;
+            }
+        }
+
+        return null;
+    }
+}

@@ -67,7 +67,7 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
 
     /// <summary>Round time with so many sites.</summary>
     public static double RoundAtLoad(in TrialBase bare, double sites) =>
-        StateAt(bare.Point, bare.Layout, bare.Distance, sites).Times.RoundSeconds;
+        TimesAt(bare.Point, bare.Layout, bare.Distance, sites).RoundSeconds;
 
     /// <summary>Judges one machine and offers it to the unbeaten ones when it meets the goal.</summary>
     public void Try(in TrialBase bare, Factory? factory, int count, UnbeatenSet unbeaten)
@@ -80,15 +80,19 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             return;
         }
 
-        OperatingState state = StateAt(bare.Point, bare.Layout, bare.Distance, bare.TileAtoms + factoryAtoms);
-        if (state.Times.RoundSeconds * supplyRoundsPerT * bare.LeastTStates is double supply && unbeaten.Beats(atoms, supply))
+        CycleTimes times = TimesAt(bare.Point, bare.Layout, bare.Distance, bare.TileAtoms + factoryAtoms);
+        double reaction = bare.Point.ReactionSeconds(bare.Distance);
+        RunClock shortest = RunClock.Of(
+            bare.Layout, _leastDemand, bare.Distance, times.RoundSeconds, reaction, supplyRoundsPerT);
+        if (unbeaten.Beats(atoms, shortest.RunSeconds))
         {
             return;
         }
 
+        OperatingState state = bare.Point.StateOf(times);
+
         double perRound = PatchError.PerRound(space.Law, state.Strength * bare.Layout.NoiseFactor, bare.Distance);
         double tiles = bare.Layout.Tiles + (factories.CountsAsTiles ? TileFactory.Tiles * count : 0);
-        double reaction = bare.Point.ReactionSeconds(bare.Distance);
         double rotationError = FirstRotationError(_scenario, limits);
         while (true)
         {
@@ -123,7 +127,10 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
 
     /// <summary>Times and noise of a layout with a number of sites, patch moves included.</summary>
     public static OperatingState StateAt(OperatingPoint point, LogicLayout layout, int distance, double sites) =>
-        point.At(MachineLoad.Of(sites, distance), ExtraWaiting(point, layout, distance));
+        point.StateOf(TimesAt(point, layout, distance, sites));
+
+    private static CycleTimes TimesAt(OperatingPoint point, LogicLayout layout, int distance, double sites) =>
+        point.Times(MachineLoad.Of(sites, distance), ExtraWaiting(point, layout, distance));
 
     private static double ExtraWaiting(OperatingPoint point, LogicLayout layout, int distance) =>
         layout.GatesPerRound > 0 ? layout.GatesPerRound * point.PatchMoveSeconds(distance) : 0;

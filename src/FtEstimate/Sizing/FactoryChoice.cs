@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using FtEstimate.MagicStates;
 using FtEstimate.Noise;
 using FtEstimate.SurfaceCode;
@@ -19,12 +20,13 @@ internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogu
     public bool CountsAsTiles => space.Scenario.Method.Factory == TileFactoryName;
 
     /// <summary>Factories at the noise rounded up to the catalogue's grid, so that neighbouring sizes share an evaluation.</summary>
+    /// <param name="point">Readout and exposure.</param>
     /// <param name="state">Times and noise.</param>
     /// <param name="distance">Code distance of the tiles.</param>
     /// <param name="errorAtMost">No state may err more.</param>
-    public IReadOnlyList<Factory> At(in OperatingState state, int distance, double errorAtMost)
+    public ImmutableArray<Factory> At(OperatingPoint point, in OperatingState state, int distance, double errorAtMost)
     {
-        double injected = Injected(state);
+        double injected = Injected(point, state);
         if (CountsAsTiles)
         {
             return [TileFactory.Of(distance, space.Patch.AtomsPerTile(distance), injected)];
@@ -37,7 +39,7 @@ internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogu
     }
 
     /// <summary>One factory at the exact noise, for the report.</summary>
-    public Factory Exactly(Factory factory, in OperatingState state)
+    public Factory Exactly(Factory factory, OperatingPoint point, in OperatingState state)
     {
         if (factory.Design is not { } chosen)
         {
@@ -45,10 +47,12 @@ internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogu
         }
 
         NoiseStrength strength = state.Strength;
-        return Factory.Of(chosen, new FactoryNoise(d => PatchError.PerRound(space.Law, strength, d), Injected(state)));
+        return Factory.Of(chosen, new FactoryNoise(d => PatchError.PerRound(space.Law, strength, d), Injected(point, state)));
     }
 
-    private double Injected(in OperatingState state) => space.Scenario.Method.InjectedError ?? state.InjectedError;
+    /// <summary>Pauli probability of an injected T state, as the scenario or the machine has it.</summary>
+    public double Injected(OperatingPoint point, in OperatingState state) =>
+        space.Scenario.Method.InjectedError ?? point.InjectedError(state);
 }
 
 /// <summary>A noise rounded up to the grid of the catalogue in every respect.</summary>

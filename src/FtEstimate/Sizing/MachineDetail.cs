@@ -21,7 +21,8 @@ internal sealed class MachineDetail(SearchSpace space, FactoryChoice factories)
         double factoryAtoms = (candidate.Factory?.Atoms ?? 0.0) * candidate.FactoryCount;
         double sites = tileAtoms + factoryAtoms;
         OperatingState state = CandidateTrial.StateAt(candidate.Point, layout, distance, sites);
-        Factory? factory = candidate.Factory is { } rounded ? factories.Exactly(rounded, candidate.Point.At(MachineLoad.Of(sites, distance))) : null;
+        OperatingState unmoved = candidate.Point.At(MachineLoad.Of(sites, distance));
+        Factory? factory = candidate.Factory is { } rounded ? factories.Exactly(rounded, candidate.Point, unmoved) : null;
         NoiseStrength strength = state.Strength * layout.NoiseFactor;
         double perRound = PatchError.PerRound(space.Law, strength, distance);
         TStateDemand demand = TStateDemand.For(
@@ -50,6 +51,7 @@ internal sealed class MachineDetail(SearchSpace space, FactoryChoice factories)
             demand,
             factory,
             candidate.FactoryCount,
+            factory is null ? 0 : factories.Injected(candidate.Point, unmoved),
             clock,
             reaction,
             failure,
@@ -60,7 +62,7 @@ internal sealed class MachineDetail(SearchSpace space, FactoryChoice factories)
     /// <summary>The ledger of an operating point; an abstract machine has one cause.</summary>
     public static ErrorLedger LedgerOf(OperatingPoint point, in OperatingState state) => point is AtomOperatingPoint atom
         ? atom.Noise.Ledger(state.Times)
-        : new ErrorLedger([new ErrorChannel("Uniform error of every location", state.InjectedError, 1, state.Strength)]);
+        : new ErrorLedger([new ErrorChannel("Uniform error of every location", point.InjectedError(state), 1, state.Strength)]);
 
     private static ImmutableArray<CyclePhase> PhasesOf(
         OperatingPoint point, LogicLayout layout, int distance, double sites, in OperatingState state)

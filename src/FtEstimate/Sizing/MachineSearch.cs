@@ -12,13 +12,13 @@ namespace FtEstimate.Sizing;
 internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, SearchLimits limits, LogicStyle style)
 {
     /// <summary>Machine sizes are walked in steps of this ratio; within a step all factories see the noise of its upper end.</summary>
-    private const double SizeStep = 1.1;
+    private const double SizeStep = 1.2;
 
     /// <summary>Once the tiles take less than this share of the allowed failure, a larger distance buys nothing.</summary>
     private const double NegligibleShare = 1e-2;
 
     /// <summary>At most this many factory counts are tried within one size step.</summary>
-    private const int CountsPerSizeStep = 3;
+    private const int CountsPerSizeStep = 4;
 
     private readonly CandidateTrial _trial = new(space, factories, limits);
     private readonly UnbeatenSet _unbeaten = new();
@@ -42,14 +42,10 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
 
     private void SearchDistances(OperatingPoint point, LogicLayout layout)
     {
-        for (int distance = 3; distance <= SearchSpace.LargestDistance; distance += 2)
+        for (int distance = SmallestWorthTrying(point, layout); distance <= SearchSpace.LargestDistance; distance += 2)
         {
             TrialBase bare = _trial.WithoutFactories(point, layout, distance);
-            bool hopeless = bare.Strength.Worse >= 1
-                || bare.Atoms > limits.AtomsAtMost
-                || bare.RunSeconds > limits.ElapsedAtMost
-                || _unbeaten.Beats(bare.Atoms, bare.RunSeconds);
-            if (hopeless)
+            if (IsHopeless(bare))
             {
                 // a larger distance has more atoms, longer layers and a longer run
                 return;
@@ -66,6 +62,34 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 return;
             }
         }
+    }
+
+    private bool IsHopeless(in TrialBase bare) =>
+        bare.Strength.Worse >= 1
+        || bare.Atoms > limits.AtomsAtMost
+        || bare.RunSeconds > limits.ElapsedAtMost
+        || _unbeaten.Beats(bare.Atoms, bare.RunSeconds);
+
+    /// <summary>The smallest distance whose tiles alone keep the allowed failure, found in strides; the smallest of all when no stride meets one.</summary>
+    private int SmallestWorthTrying(OperatingPoint point, LogicLayout layout)
+    {
+        const int smallest = 3;
+        const int stride = 8;
+        for (int distance = smallest; distance <= SearchSpace.LargestDistance; distance += stride)
+        {
+            TrialBase bare = _trial.WithoutFactories(point, layout, distance);
+            if (bare.Strength.Worse >= 1)
+            {
+                break;
+            }
+
+            if (bare.PatchFailure < limits.FailureAtMost)
+            {
+                return Math.Max(smallest, distance - stride + 2);
+            }
+        }
+
+        return smallest;
     }
 
     private void SearchFactories(in TrialBase bare)
@@ -93,14 +117,14 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             double longestUsefulRun = _trial.RunAtLoad(bare, state.Times.RoundSeconds);
             double leastRoundSeconds = CandidateTrial.RoundAtLoad(bare, Math.Max(low, bare.TileAtoms));
             bool moreIsUseful = false;
-            foreach (Factory factory in factories.At(state, bare.Distance, errorAtMost))
+            foreach (Factory factory in factories.At(bare.Point, state, bare.Distance, errorAtMost))
             {
-                double roundsOfSupply = bare.LeastTStates * factory.RoundsPerOutput;
-                double useful = Math.Ceiling(roundsOfSupply * state.Times.RoundSeconds / longestUsefulRun);
+                double supplyRounds = bare.LeastTStates * factory.RoundsPerOutput;
+                double useful = Math.Ceiling(supplyRounds * state.Times.RoundSeconds / longestUsefulRun);
                 double most = Math.Floor((high - bare.TileAtoms) / factory.Atoms);
                 double least = Math.Max(1, Math.Floor((low - bare.TileAtoms) / factory.Atoms) + 1);
                 moreIsUseful |= useful > most;
-                TryCounts(bare, factory, leastRoundSeconds, least, Math.Min(most, useful));
+                TryCounts(bare, factory, supplyRounds * leastRoundSeconds, least, Math.Min(most, useful));
             }
 
             if (!moreIsUseful || bare.Atoms * (high / bare.TileAtoms) > limits.AtomsAtMost * SizeStep)
@@ -110,7 +134,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         }
     }
 
-    private void TryCounts(in TrialBase bare, Factory factory, double leastRoundSeconds, double least, double most)
+    private void TryCounts(in TrialBase bare, Factory factory, double supplySecondsOfOne, double least, double most)
     {
         if (space.Scenario.Method.FactoryCount is { } only)
         {
@@ -123,7 +147,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             return;
         }
 
-        if (least > most || Beaten(bare, factory, leastRoundSeconds, least, most))
+        if (least > most || Beaten(bare, factory, supplySecondsOfOne, least, most))
         {
             return;
         }
@@ -131,7 +155,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         double stride = Math.Max(1, Math.Ceiling((most - least + 1) / CountsPerSizeStep));
         for (double count = most; count >= least; count -= stride)
         {
-            if (!Beaten(bare, factory, leastRoundSeconds, count, count))
+            if (!Beaten(bare, factory, supplySecondsOfOne, count, count))
             {
                 _trial.Try(bare, factory, (int)count, _unbeaten);
             }
@@ -139,11 +163,8 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     }
 
     /// <summary>Whether even the atoms of the least and the supply of the most of so many factories are beaten.</summary>
-    private bool Beaten(in TrialBase bare, Factory factory, double leastRoundSeconds, double least, double most)
-    {
-        double shortestSupply = bare.LeastTStates * factory.RoundsPerOutput / most * leastRoundSeconds;
-        return _unbeaten.Beats(bare.Atoms + (factory.Atoms * least), Math.Max(bare.RunSeconds, shortestSupply));
-    }
+    private bool Beaten(in TrialBase bare, Factory factory, double supplySecondsOfOne, double least, double most) =>
+        _unbeaten.Beats(bare.Atoms + (factory.Atoms * least), Math.Max(bare.RunSeconds, supplySecondsOfOne / most));
 
     private static int SizeStepOf(double sites) => (int)Math.Floor(Math.Log(sites) / Math.Log(SizeStep));
 }

@@ -141,16 +141,20 @@ internal static class NoAnswerFinder
 
         public override int CheckAtomsInUse => point.CheckAtomsInUse;
 
-        public override OperatingState At(in MachineLoad load, double extraWaitingSeconds = 0)
+        public override CycleTimes Times(in MachineLoad load, double extraWaitingSeconds = 0) =>
+            point.Times(load, extraWaitingSeconds);
+
+        public override OperatingState StateOf(in CycleTimes times)
         {
-            OperatingState state = point.At(load, extraWaitingSeconds);
+            OperatingState state = point.StateOf(times);
             return state with
             {
                 Strength = state.Strength * factor,
-                InjectedError = state.InjectedError * factor,
                 Loss = new AtomLoss(state.Loss.PerGateSlot * factor, state.Loss.DataPerRound * factor, state.Loss.CheckPerRound * factor),
             };
         }
+
+        public override double InjectedError(in OperatingState state) => point.InjectedError(state) * factor;
 
         public override double ReactionSeconds(int distance) => point.ReactionSeconds(distance);
 

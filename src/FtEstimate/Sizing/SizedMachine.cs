@@ -21,6 +21,7 @@ namespace FtEstimate.Sizing;
 /// <param name="Demand">Magic states and depth.</param>
 /// <param name="Factory">The factory at the exact noise; null when no magic states are needed.</param>
 /// <param name="FactoryCount">How many.</param>
+/// <param name="InjectedError">Pauli probability of an injected T state; 0 when no magic states are needed.</param>
 /// <param name="Clock">What sets the pace.</param>
 /// <param name="ReactionSeconds">One reaction.</param>
 /// <param name="Failure">Where the failure of one shot comes from.</param>
@@ -41,6 +42,7 @@ public sealed record SizedMachine(
     TStateDemand Demand,
     Factory? Factory,
     int FactoryCount,
+    double InjectedError,
     RunClock Clock,
     double ReactionSeconds,
     FailureBudget Failure,

@@ -1,0 +1,61 @@
+using System.CommandLine;
+using System.CommandLine.Invocation;
+
+namespace FtEstimate.Cli;
+
+/// <summary>The command line: builds the commands, runs one, turns its outcome into an exit status.</summary>
+public static class App
+{
+    /// <summary>Runs one command line.</summary>
+    /// <param name="args">The words after the program's name.</param>
+    /// <param name="output">Where reports go.</param>
+    /// <param name="error">Where faults and progress go.</param>
+    /// <returns>0 an answer, 2 wrong input, 3 no machine meets the goal, 130 interrupted.</returns>
+    public static async Task<int> RunAsync(IReadOnlyList<string> args, TextWriter output, TextWriter error)
+    {
+        RootCommand root = new(
+            "FtEstimate: from bench numbers of a neutral-atom machine to the atoms and the time a fault-tolerant run needs.")
+        {
+            ReportCommand.Create(),
+            WorkloadCommand.Create(),
+            FactoriesCommand.Create(),
+            ValidationCommand.Create(),
+        };
+        root.SetAction(parsed => new System.CommandLine.Help.HelpAction().Invoke(parsed));
+
+        // "@file" is an ordinary word here
+        ParseResult parsed = root.Parse(args, new ParserConfiguration { ResponseFileTokenReplacer = null });
+        if (parsed.Action is ParseErrorAction parseError)
+        {
+            parseError.ShowHelp = false;
+        }
+
+        InvocationConfiguration io = new() { Output = output, Error = error, EnableDefaultExceptionHandler = false };
+        try
+        {
+            int status = await parsed.InvokeAsync(io).ConfigureAwait(false);
+            return parsed.Action is ParseErrorAction ? ExitStatus.WrongInput : status;
+        }
+        catch (OperationCanceledException)
+        {
+            await error.WriteLineAsync("interrupted").ConfigureAwait(false);
+            return ExitStatus.Interrupted;
+        }
+    }
+}
+
+/// <summary>What the program tells the shell.</summary>
+public static class ExitStatus
+{
+    /// <summary>An answer.</summary>
+    public const int Answer = 0;
+
+    /// <summary>The input is wrong.</summary>
+    public const int WrongInput = 2;
+
+    /// <summary>The input is right, but no machine meets the goal.</summary>
+    public const int NoMachine = 3;
+
+    /// <summary>Interrupted.</summary>
+    public const int Interrupted = 130;
+}

@@ -1,0 +1,84 @@
+using System.Text;
+
+namespace FtEstimate.Files;
+
+/// <summary>Writes outputs so that a file is either the old one or the complete new one.</summary>
+public static class AtomicFile
+{
+    private static readonly UTF8Encoding Utf8 = new(encoderShouldEmitUTF8Identifier: false);
+
+    /// <summary>Writes a text beside the file, flushes it to the disk, and renames it.</summary>
+    /// <param name="path">The file; replaced when it exists. Its folder must exist.</param>
+    /// <param name="text">The whole new content, written as UTF-8.</param>
+    /// <returns>Null, or why the file could not be written; then the old file is untouched.</returns>
+    public static Fault? Write(string path, string text)
+    {
+        string? beside = null;
+        try
+        {
+            if (IsDevice(path))
+            {
+                File.WriteAllText(path, text, Utf8);
+                return null;
+            }
+
+            // a link stays a link: the file it points to is replaced
+            string target = (File.Exists(path) ? File.ResolveLinkTarget(path, returnFinalTarget: true)?.FullName : null) ?? Path.GetFullPath(path);
+            if (Directory.Exists(target))
+            {
+                return new Fault(path, 0, 0, "", "cannot be written: it is a folder");
+            }
+
+            beside = $"{target}.{Guid.NewGuid():N}.part";
+            using (FileStream stream = new(beside, FileMode.CreateNew, FileAccess.Write))
+            {
+                stream.Write(Utf8.GetBytes(text));
+                stream.Flush(flushToDisk: true);
+            }
+
+            KeepPermissions(target, beside);
+            File.Move(beside, target, overwrite: true);
+            return null;
+        }
+        catch (Exception problem) when (problem is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
+        {
+            Discard(beside);
+            return new Fault(path, 0, 0, "", $"cannot be written: {Reason(problem)}");
+        }
+    }
+
+    private static string Reason(Exception problem) => problem switch
+    {
+        DirectoryNotFoundException => "its folder does not exist",
+        UnauthorizedAccessException => "permission denied",
+        ArgumentException or NotSupportedException => "not a file name",
+        _ => problem.Message,
+    };
+
+    // renaming over /dev/stdout or /dev/null would replace the device
+    private static bool IsDevice(string path) =>
+        !OperatingSystem.IsWindows() && (path.StartsWith("/dev/", StringComparison.Ordinal) || path.StartsWith("/proc/", StringComparison.Ordinal));
+
+    private static void KeepPermissions(string target, string beside)
+    {
+        if (!OperatingSystem.IsWindows() && File.Exists(target))
+        {
+            File.SetUnixFileMode(beside, File.GetUnixFileMode(target));
+        }
+    }
+
+    private static void Discard(string? beside)
+    {
+        try
+        {
+            if (beside is not null)
+            {
+                File.Delete(beside);
+            }
+        }
+        catch (Exception problem) when (problem is IOException or UnauthorizedAccessException)
+        {
+            // the fault that is reported already says more than a left-over part file would
+        }
+    }
+}

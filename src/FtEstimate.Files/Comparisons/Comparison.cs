@@ -1,0 +1,21 @@
+namespace FtEstimate.Files.Comparisons;
+
+/// <summary>A published figure to hold ours against.</summary>
+/// <param name="Topic">Heading it belongs to.</param>
+/// <param name="Kind">How ours is computed: scenario, factory, distance, law, factoring, rotation or move.</param>
+/// <param name="Subject">What is computed, in the notation of the kind.</param>
+/// <param name="Figure">Which figure of it.</param>
+/// <param name="Published">The published value, in SI units.</param>
+/// <param name="Source">First author, year, arXiv number.</param>
+/// <param name="Remark">Why the two may differ; empty: no remark.</param>
+public sealed record PublishedFigure(
+    string Topic, string Kind, string Subject, string Figure, double Published, string Source, string Remark);
+
+/// <summary>Our figure beside the published one.</summary>
+/// <param name="Figure">The published figure.</param>
+/// <param name="Ours">What the tool computes.</param>
+public sealed record Comparison(PublishedFigure Figure, double Ours)
+{
+    /// <summary>Relative deviation of ours from the published one.</summary>
+    public double Deviation => (Ours - Figure.Published) / Figure.Published;
+}
