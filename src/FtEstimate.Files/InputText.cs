@@ -60,7 +60,8 @@ internal readonly record struct InputText(string? Text, string? Problem, int Lin
             return Failed("the file is encoded as UTF-16; expected UTF-8");
         }
 
-        if (bytes.Contains((byte)0))
+        // IndexOf comes compiled with the runtime, Contains would have to be compiled at every start
+        if (bytes.IndexOf((byte)0) >= 0)
         {
             return Failed("this is a binary file; expected TOML text");
         }

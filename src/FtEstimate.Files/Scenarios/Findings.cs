@@ -99,8 +99,9 @@ internal sealed class Findings
     }
 
     /// <summary>All faults by file and place.</summary>
-    public ImmutableArray<Fault> SortedFaults() =>
-        [.. _faults.OrderBy(fault => Order(fault.File)).ThenBy(fault => fault.Line).ThenBy(fault => fault.Column)];
+    public ImmutableArray<Fault> SortedFaults() => _faults.Count == 0
+        ? []
+        : [.. _faults.OrderBy(fault => Order(fault.File)).ThenBy(fault => fault.Line).ThenBy(fault => fault.Column)];
 
     // settings come after all files
     private int Order(string file) => _files.IndexOf(file) is int index and >= 0 ? index : int.MaxValue;

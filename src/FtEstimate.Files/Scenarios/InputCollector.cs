@@ -81,7 +81,18 @@ internal static class InputCollector
         }
     }
 
-    private static bool IsPlainName(string name) => name.Length > 0 && name.All(letter => char.IsAsciiLetterOrDigit(letter) || letter is '-' or '_');
+    private static bool IsPlainName(string name)
+    {
+        foreach (char letter in name)
+        {
+            if (!char.IsAsciiLetterOrDigit(letter) && letter is not ('-' or '_'))
+            {
+                return false;
+            }
+        }
+
+        return name.Length > 0;
+    }
 
     private static KeyDefinition? FindKey(ImmutableArray<TableDefinition> definitions, string name)
     {

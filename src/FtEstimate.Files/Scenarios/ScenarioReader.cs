@@ -158,7 +158,7 @@ public static class ScenarioReader
         }
 
         string path = Path.Combine(Path.GetDirectoryName(scenarioPath) ?? "", named);
-        if (findings.Files.Any(file => IsSameFile(file, path)))
+        if (IsAmong(findings.Files, path))
         {
             findings.AddFault(reference.Place, part, $"{named} names a file that is already read here; expected a file of its own for the {part}");
             return;
@@ -191,14 +191,24 @@ public static class ScenarioReader
         }
     }
 
-    private static bool IsSameFile(string a, string b)
+    private static bool IsAmong(IReadOnlyList<string> files, string path)
     {
         try
         {
-            return Path.GetFullPath(a) == Path.GetFullPath(b);
+            string full = Path.GetFullPath(path);
+            foreach (string file in files)
+            {
+                if (Path.GetFullPath(file) == full)
+                {
+                    return true;
+                }
+            }
+
+            return false;
         }
         catch (ArgumentException)
         {
+            // no file name at all: reading it will say so
             return false;
         }
     }

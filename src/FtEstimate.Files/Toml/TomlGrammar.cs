@@ -18,7 +18,7 @@ internal sealed class TomlGrammar
     private readonly TomlTokens _tokens;
     private readonly string _file;
     private readonly List<Fault> _faults;
-    private readonly TomlSection _root;
+    private readonly TomlTree _tree;
     private TomlSection _current;
 
     private TomlGrammar(string file, string text, List<Fault> faults)
@@ -26,8 +26,8 @@ internal sealed class TomlGrammar
         _file = file;
         _faults = faults;
         _tokens = new TomlTokens(text);
-        _root = new TomlSection(new Place(file, 1, 1)) { HasHeader = true };
-        _current = _root;
+        _tree = new TomlTree(file, faults);
+        _current = _tree.Root;
     }
 
     /// <summary>Reads a document.</summary>
@@ -39,7 +39,7 @@ internal sealed class TomlGrammar
     {
         TomlGrammar grammar = new(file, text, faults);
         grammar.ReadDocument();
-        return grammar._root;
+        return grammar._tree.Root;
     }
 
     private void ReadDocument()
@@ -78,7 +78,7 @@ internal sealed class TomlGrammar
         // keys under a header that cannot be read belong nowhere
         _current = new TomlSection(PlaceHere());
         _tokens.Next(TomlLexerMode.Key);
-        List<KeyPart> parts = [];
+        List<TomlKeyPart> parts = [];
         if (!ReadKey(parts))
         {
             return false;
@@ -90,57 +90,13 @@ internal sealed class TomlGrammar
         }
 
         _tokens.Next(TomlLexerMode.Key);
-        TomlSection? parent = Descend(_root, parts);
-        if (parent is not null)
-        {
-            Open(parent, parts[^1], isRepeated: close == TokenKind.CloseBracketDouble);
-        }
-
+        _current = _tree.Open(parts, isRepeated: close == TokenKind.CloseBracketDouble) ?? _current;
         return true;
-    }
-
-    private void Open(TomlSection parent, KeyPart part, bool isRepeated)
-    {
-        TomlNode? existing = parent.Find(part.Name);
-        if (isRepeated)
-        {
-            if (existing is not (null or TomlList { IsOfTables: true }))
-            {
-                Report(part, $"{part.Name} stands already on line {existing.Place.Line}");
-                return;
-            }
-
-            TomlList list = existing as TomlList ?? new TomlList(part.Place, isOfTables: true);
-            parent.Set(part.Name, list);
-            _current = new TomlSection(part.Place) { HasHeader = true };
-            list.Items.Add(_current);
-            return;
-        }
-
-        if (existing is TomlSection { IsClosed: false } section)
-        {
-            if (section.HasHeader)
-            {
-                Report(part, $"the table {part.Name} stands already on line {section.Place.Line}");
-            }
-
-            section.HasHeader = true;
-            _current = section;
-        }
-        else if (existing is null)
-        {
-            _current = new TomlSection(part.Place) { HasHeader = true };
-            parent.Set(part.Name, _current);
-        }
-        else
-        {
-            Report(part, $"{part.Name} stands already on line {existing.Place.Line}");
-        }
     }
 
     private bool ReadAssignment(TomlSection target, TomlLexerMode after, int depth)
     {
-        List<KeyPart> parts = [];
+        List<TomlKeyPart> parts = [];
         if (!ReadKey(parts))
         {
             return false;
@@ -158,24 +114,11 @@ internal sealed class TomlGrammar
             return false;
         }
 
-        TomlSection? section = Descend(target, parts);
-        if (section is null)
-        {
-            return true;
-        }
-
-        KeyPart last = parts[^1];
-        if (section.Find(last.Name) is TomlNode existing)
-        {
-            Report(last, $"duplicate key: {last.Name} stands already on line {existing.Place.Line}");
-            return true;
-        }
-
-        section.Set(last.Name, value);
+        _tree.Add(target, parts, value);
         return true;
     }
 
-    private bool ReadKey(List<KeyPart> parts)
+    private bool ReadKey(List<TomlKeyPart> parts)
     {
         while (true)
         {
@@ -184,7 +127,7 @@ internal sealed class TomlGrammar
                 return Fail(_tokens.Kind is TokenKind.NewLine or TokenKind.Eof ? "expected a key before the end of the line" : "expected a key");
             }
 
-            parts.Add(new KeyPart(_tokens.Text, PlaceHere()));
+            parts.Add(new TomlKeyPart(_tokens.Text, PlaceHere()));
             _tokens.Next(TomlLexerMode.Key);
             if (_tokens.Kind != TokenKind.Dot)
             {
@@ -198,36 +141,6 @@ internal sealed class TomlGrammar
 
             _tokens.Next(TomlLexerMode.Key);
         }
-    }
-
-    private TomlSection? Descend(TomlSection from, List<KeyPart> parts)
-    {
-        TomlSection section = from;
-        for (int i = 0; i < parts.Count - 1; i++)
-        {
-            KeyPart part = parts[i];
-            TomlNode? node = section.Find(part.Name);
-            if (node is TomlList { IsOfTables: true } list)
-            {
-                node = list.Items[^1];
-            }
-
-            if (node is null)
-            {
-                node = new TomlSection(part.Place);
-                section.Set(part.Name, node);
-            }
-
-            if (node is not TomlSection { IsClosed: false } next)
-            {
-                Report(part, $"{part.Name} stands already on line {node.Place.Line} as {node.Description}; nothing can be added to it here");
-                return null;
-            }
-
-            section = next;
-        }
-
-        return section;
     }
 
     private TomlNode? ReadValue(Place place, TomlLexerMode after, int depth)
@@ -333,9 +246,4 @@ internal sealed class TomlGrammar
         _faults.Add(new Fault(_file, _tokens.ErrorLine, _tokens.ErrorColumn, "", _tokens.Error ?? message));
         return false;
     }
-
-    private void Report(KeyPart part, string message) =>
-        _faults.Add(new Fault(_file, part.Place.Line, part.Place.Column, part.Name, message));
-
-    private sealed record KeyPart(string Name, Place Place);
 }

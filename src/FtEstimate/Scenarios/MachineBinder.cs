@@ -28,14 +28,14 @@ internal static class MachineBinder
 
     private static AtomArray BindArray(InputSet inputs)
     {
-        (ReadoutScheme inUse, ImmutableArray<ReadoutScheme> others) = ReadoutBinder.Bind(inputs);
+        ImmutableArray<ReadoutScheme> schemes = ReadoutBinder.Bind(inputs);
         return new AtomArray(
             BindGeometry(new TableInputs(inputs, MachineKeys.Array.Path)),
             BindGates(new TableInputs(inputs, GateKeys.Gates.Path)),
             BindReach(new TableInputs(inputs, ReachKeys.MovedAtoms.Path), new TableInputs(inputs, ReachKeys.Cycle.Path)),
             BindCoherence(new TableInputs(inputs, CoherenceKeys.Coherence.Path), new TableInputs(inputs, OperationKeys.Running.Path)),
-            inUse,
-            others);
+            schemes[0],
+            schemes[1..]);
     }
 
     private static ArrayGeometry BindGeometry(TableInputs array) => new(

@@ -13,17 +13,24 @@ public static class PhysicalSense
 {
     /// <summary>All faults; none: <see cref="ScenarioBinder.Bind"/> may be called.</summary>
     /// <param name="draft">Inputs whose single values are within the bounds of their keys.</param>
-    public static ImmutableArray<SenseFault> Check(ScenarioDraft draft) =>
-    [
-        .. ShapeRules.Check(draft),
-        .. ArrayRules.Check(draft),
-        .. ReadoutRules.Check(draft),
-        .. RunningRules.Check(draft),
-        .. CheckWorkload(draft),
-        .. FactoryRules.Check(draft),
-    ];
+    public static ImmutableArray<SenseFault> Check(ScenarioDraft draft)
+    {
+        List<SenseFault> faults = [];
+        ShapeRules.Check(draft, faults);
+        ArrayRules.Check(draft, faults);
+        ReadoutRules.Check(draft, faults);
+        RunningRules.Check(draft, faults);
+        WorkloadRules.Check(draft, faults);
+        FactoryRules.Check(draft, faults);
+        return [.. faults];
+    }
 
     /// <summary>All faults of a workload alone; none: <see cref="WorkloadBinder.Bind"/> may be called.</summary>
     /// <param name="draft">Inputs of at least the workload.</param>
-    public static IEnumerable<SenseFault> CheckWorkload(ScenarioDraft draft) => WorkloadRules.Check(draft);
+    public static ImmutableArray<SenseFault> CheckWorkload(ScenarioDraft draft)
+    {
+        List<SenseFault> faults = [];
+        WorkloadRules.Check(draft, faults);
+        return [.. faults];
+    }
 }

@@ -10,30 +10,24 @@ internal static class ReadoutBinder
     private const string Stem = ReadoutKeys.Path + ".";
     private const string KindEnd = ".kind";
 
-    /// <summary>The scheme in use and the others, in the order of the file.</summary>
-    public static (ReadoutScheme InUse, ImmutableArray<ReadoutScheme> Others) Bind(InputSet inputs)
+    /// <summary>All schemes, the one in use first, the others in the order of the file.</summary>
+    public static ImmutableArray<ReadoutScheme> Bind(InputSet inputs)
     {
         string use = new TableInputs(inputs, ReadoutKeys.Path).Text(ReadoutKeys.Use);
-        ReadoutScheme? inUse = null;
-        ImmutableArray<ReadoutScheme>.Builder others = ImmutableArray.CreateBuilder<ReadoutScheme>();
+        ImmutableArray<ReadoutScheme>.Builder schemes = ImmutableArray.CreateBuilder<ReadoutScheme>();
+        schemes.Add(BindScheme(inputs, use));
         foreach (string name in SchemeNames(inputs))
         {
-            ReadoutScheme scheme = BindScheme(inputs, name);
-            if (name == use)
+            if (name != use)
             {
-                inUse = scheme;
-            }
-            else
-            {
-                others.Add(scheme);
+                schemes.Add(BindScheme(inputs, name));
             }
         }
 
-        return (inUse ?? throw new InvalidOperationException($"no readout scheme {use}"), others.ToImmutable());
+        return schemes.ToImmutable();
     }
 
-    /// <summary>The names of the schemes that state their kind, in the order of the file.</summary>
-    public static IEnumerable<string> SchemeNames(InputSet inputs)
+    private static IEnumerable<string> SchemeNames(InputSet inputs)
     {
         foreach (Input input in inputs.InOrder)
         {
@@ -47,12 +41,9 @@ internal static class ReadoutBinder
         }
     }
 
-    /// <summary>The table of a scheme.</summary>
-    public static string TableOf(string name) => Stem + name;
-
     private static ReadoutScheme BindScheme(InputSet inputs, string name)
     {
-        TableInputs scheme = new(inputs, TableOf(name));
+        TableInputs scheme = new(inputs, Stem + name);
         Detector detector = BindDetector(scheme, new TableInputs(inputs, DetectionKeys.Detection.Path));
         double recoolSeconds = scheme.Number(ReadoutKeys.RecoolTime);
         return scheme.Text(ReadoutKeys.Kind) switch
@@ -128,8 +119,8 @@ internal static class ReadoutBinder
         double NumberOr(KeyDefinition key, double otherwise) => scheme.NumberOrNull(key) ?? detection.NumberOr(key, otherwise);
     }
 
-    /// <summary>Whether a scheme's detector counts photons: what the scheme states goes before what [detection] states.</summary>
-    public static bool CountsPhotons(TableInputs scheme, TableInputs detection) =>
+    // what the scheme states goes before what [detection] states
+    private static bool CountsPhotons(TableInputs scheme, TableInputs detection) =>
         !StatesFlips(scheme) && (scheme.Gives(DetectionKeys.Signal) || !StatesFlips(detection));
 
     private static bool StatesFlips(TableInputs table) => table.Gives(DetectionKeys.FlipError) || table.Gives(DetectionKeys.DarkFlip);

@@ -4,6 +4,7 @@ using FtEstimate.Noise;
 using FtEstimate.Quantities;
 using FtEstimate.Scenarios;
 using FtEstimate.SurfaceCode;
+using FtEstimate.Workloads;
 
 namespace FtEstimate.Sizing;
 
@@ -14,7 +15,7 @@ namespace FtEstimate.Sizing;
 /// <param name="TileAtoms">Atoms of the tiles.</param>
 /// <param name="Atoms">All atoms without factories.</param>
 /// <param name="Strength">Noise strength with its transversal gates.</param>
-/// <param name="LeastTStates">T states when the rotations may use the whole allowed failure.</param>
+/// <param name="LeastTStates">T states when the rotations may use what the patches leave of the allowed failure: no machine needs fewer.</param>
 /// <param name="RunSeconds">Run time with unlimited supply: no machine is faster.</param>
 /// <param name="PatchFailure">Expected logical faults of the tiles then: no machine has fewer.</param>
 internal readonly record struct TrialBase(
@@ -35,8 +36,11 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
     private const double RotationBitStep = 0.5;
 
     private readonly Scenario _scenario = space.Scenario;
-    private readonly TStateDemand _leastDemand = TStateDemand.For(
-        space.Scenario.Workload, space.Synthesis, FirstRotationError(space.Scenario, limits));
+    private TStateDemand? _leastDemand;
+
+    /// <summary>Demand when the rotations may use the whole allowed failure: no machine needs less.</summary>
+    private TStateDemand LeastDemand => _leastDemand ??= TStateDemand.For(
+        _scenario.Workload, space.Synthesis, RotationErrorWithin(limits.FaultsAtMost));
 
     /// <summary>The bounds of a layout at a distance.</summary>
     public TrialBase WithoutFactories(OperatingPoint point, LogicLayout layout, int distance)
@@ -46,8 +50,9 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
         OperatingState state = StateAt(point, layout, distance, tileAtoms);
         NoiseStrength strength = state.Strength * layout.NoiseFactor;
         RunClock clock = RunClock.Of(
-            layout, _leastDemand, distance, state.Times.RoundSeconds, point.ReactionSeconds(distance), 0);
+            layout, LeastDemand, distance, state.Times.RoundSeconds, point.ReactionSeconds(distance), 0);
         double perRound = PatchError.PerRound(space.Law, strength, distance);
+        double patchFailure = FailureComposition.ExpectedFaults(layout.Tiles * clock.Rounds, perRound);
         return new TrialBase(
             point,
             layout,
@@ -55,14 +60,23 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             tileAtoms,
             atoms,
             strength,
-            _leastDemand.TStates,
+            LeastTStates(patchFailure),
             clock.RunSeconds,
-            FailureComposition.ExpectedFaults(layout.Tiles * clock.Rounds, perRound));
+            patchFailure);
+    }
+
+    /// <summary>T states when the rotations may use what the patches leave of the allowed failure.</summary>
+    private double LeastTStates(double patchFailure)
+    {
+        double left = limits.Each ? limits.FaultsAtMost : limits.FaultsAtMost - patchFailure;
+        return left <= 0
+            ? LeastDemand.TStates
+            : TStateDemand.For(_scenario.Workload, space.Synthesis, RotationErrorWithin(left)).TStates;
     }
 
     /// <summary>Shortest run at a given round time, with unlimited supply.</summary>
     public double RunAtLoad(in TrialBase bare, double roundSeconds) => RunClock.Of(
-        bare.Layout, _leastDemand, bare.Distance, roundSeconds + ExtraWaiting(bare.Point, bare.Layout, bare.Distance),
+        bare.Layout, LeastDemand, bare.Distance, roundSeconds + ExtraWaiting(bare.Point, bare.Layout, bare.Distance),
         bare.Point.ReactionSeconds(bare.Distance), 0).RunSeconds;
 
     /// <summary>Round time with so many sites.</summary>
@@ -74,54 +88,61 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
     {
         double factoryAtoms = (factory?.Atoms ?? 0.0) * count;
         double atoms = AtomCount.Of(bare.TileAtoms, factoryAtoms, bare.Point, _scenario.Machine.Supply.SpareFraction).Total;
-        double supplyRoundsPerT = factory is null ? 0 : factory.RoundsPerOutput / count;
-        if (atoms > limits.AtomsAtMost || unbeaten.Beats(atoms, bare.RunSeconds))
+        double leastFaultyStates = FailureComposition.ExpectedFaults(bare.LeastTStates, factory?.OutputError ?? 0);
+        double leftForRotations = limits.Each ? limits.FaultsAtMost : limits.FaultsAtMost - bare.PatchFailure - leastFaultyStates;
+        if (atoms > limits.AtomsAtMost || leftForRotations <= 0 || leastFaultyStates > limits.FaultsAtMost)
         {
             return;
         }
 
         CycleTimes times = TimesAt(bare.Point, bare.Layout, bare.Distance, bare.TileAtoms + factoryAtoms);
-        double reaction = bare.Point.ReactionSeconds(bare.Distance);
-        RunClock shortest = RunClock.Of(
-            bare.Layout, _leastDemand, bare.Distance, times.RoundSeconds, reaction, supplyRoundsPerT);
-        if (unbeaten.Beats(atoms, shortest.RunSeconds))
+        Pacing pacing = new(
+            bare, times.RoundSeconds, bare.Point.ReactionSeconds(bare.Distance), factory is null ? 0 : factory.RoundsPerOutput / count);
+        TStateDemand demand = TStateDemand.For(_scenario.Workload, space.Synthesis, RotationErrorWithin(leftForRotations));
+        if (unbeaten.Beats(atoms, pacing.Clock(demand).RunSeconds))
         {
             return;
         }
 
         OperatingState state = bare.Point.StateOf(times);
+        if (AtomSupply.DemandPerSecond(bare.TileAtoms + factoryAtoms, bare.Point, state) > limits.SupplyPerSecond)
+        {
+            return;
+        }
 
-        double perRound = PatchError.PerRound(space.Law, state.Strength * bare.Layout.NoiseFactor, bare.Distance);
         double tiles = bare.Layout.Tiles + (factories.CountsAsTiles ? TileFactory.Tiles * count : 0);
-        double rotationError = FirstRotationError(_scenario, limits);
+        double perRound = PatchError.PerRound(space.Law, state.Strength * bare.Layout.NoiseFactor, bare.Distance);
+        if (CoarsestRotations(pacing, demand, tiles, perRound, factory?.OutputError ?? 0) is { } found
+            && KeepsElapsed(found.Clock.RunSeconds, found.Failure.Total))
+        {
+            unbeaten.Offer(new Candidate(
+                bare.Point, bare.Layout, bare.Distance, factory, count, found.RotationError, atoms, found.Clock.RunSeconds));
+        }
+    }
+
+    /// <summary>The coarsest rotations, and so the fewest T states, with which the goal is met; null when none are fine enough.</summary>
+    private MetGoal? CoarsestRotations(in Pacing pacing, TStateDemand demand, double tiles, double errorPerRound, double errorPerState)
+    {
         while (true)
         {
-            TStateDemand demand = TStateDemand.For(_scenario.Workload, space.Synthesis, rotationError);
-            RunClock clock = RunClock.Of(
-                bare.Layout, demand, bare.Distance, state.Times.RoundSeconds, reaction, supplyRoundsPerT);
+            RunClock clock = pacing.Clock(demand);
             FailureBudget failure = new(
-                FailureComposition.ExpectedFaults(tiles * clock.Rounds, perRound),
-                FailureComposition.ExpectedFaults(demand.TStates, factory?.OutputError ?? 0),
+                FailureComposition.ExpectedFaults(tiles * clock.Rounds, errorPerRound),
+                FailureComposition.ExpectedFaults(demand.TStates, errorPerState),
                 demand.SynthesisFailure);
             if (failure.Meets(limits.FailureAtMost, limits.Each))
             {
-                if (KeepsLimits(bare, state, factoryAtoms, clock.RunSeconds, failure.Total))
-                {
-                    unbeaten.Offer(new Candidate(
-                        bare.Point, bare.Layout, bare.Distance, factory, count, demand.RotationError, atoms, clock.RunSeconds));
-                }
-
-                return;
+                return new MetGoal(clock, failure, demand.RotationError);
             }
 
             bool finerHelps = _scenario.Workload is { Rotations: > 0, RotationError: null }
-                && failure.Patches + failure.MagicStates < limits.FailureAtMost;
+                && failure.Patches + failure.MagicStates < limits.FaultsAtMost;
             if (!finerHelps)
             {
-                return;
+                return null;
             }
 
-            rotationError *= Math.Pow(2, -RotationBitStep);
+            demand = TStateDemand.For(_scenario.Workload, space.Synthesis, demand.RotationError * Math.Pow(2, -RotationBitStep));
         }
     }
 
@@ -135,27 +156,30 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
     private static double ExtraWaiting(OperatingPoint point, LogicLayout layout, int distance) =>
         layout.GatesPerRound > 0 ? layout.GatesPerRound * point.PatchMoveSeconds(distance) : 0;
 
-    /// <summary>The coarsest rotation error worth trying: all rotations together use the whole allowed failure.</summary>
-    private static double FirstRotationError(Scenario scenario, SearchLimits limits)
+    /// <summary>The coarsest rotation error on the grid with which all rotations together keep to a number of faults.</summary>
+    private double RotationErrorWithin(double faults)
     {
-        if (scenario.Workload.RotationError is { } stated)
+        Workload workload = _scenario.Workload;
+        if (workload.RotationError is { } stated)
         {
             return stated;
         }
 
-        double bits = scenario.Workload.Rotations > 0 ? Math.Log2(scenario.Workload.Rotations / limits.FailureAtMost) : 1;
+        double bits = workload.Rotations > 0 ? Math.Max(1, Math.Log2(workload.Rotations / faults)) : 1;
         return Math.Pow(2, -Math.Ceiling(bits / RotationBitStep) * RotationBitStep);
     }
 
-    private bool KeepsLimits(in TrialBase bare, in OperatingState state, double factoryAtoms, double runSeconds, double failure)
-    {
-        if (AtomSupply.DemandPerSecond(bare.TileAtoms + factoryAtoms, bare.Point, state) > limits.SupplyPerSecond)
-        {
-            return false;
-        }
+    private bool KeepsElapsed(double runSeconds, double failure) =>
+        double.IsPositiveInfinity(limits.ElapsedAtMost)
+        || (ElapsedTime.Of(runSeconds, _scenario.Workload.Shots, failure, _scenario.Machine.Running).Seconds is { } elapsed
+            && elapsed <= limits.ElapsedAtMost);
 
-        return double.IsPositiveInfinity(limits.ElapsedAtMost)
-            || (ElapsedTime.Of(runSeconds, _scenario.Workload.Shots, failure, _scenario.Machine.Running).Seconds is { } elapsed
-                && elapsed <= limits.ElapsedAtMost);
+    /// <summary>What sets the clock of one machine, whatever its rotations cost.</summary>
+    private readonly record struct Pacing(TrialBase Bare, double RoundSeconds, double ReactionSeconds, double SupplyRoundsPerT)
+    {
+        public RunClock Clock(in TStateDemand demand) =>
+            RunClock.Of(Bare.Layout, demand, Bare.Distance, RoundSeconds, ReactionSeconds, SupplyRoundsPerT);
     }
+
+    private readonly record struct MetGoal(RunClock Clock, FailureBudget Failure, double RotationError);
 }

@@ -1,7 +1,7 @@
+using System.Collections.Immutable;
 using FtEstimate.Cycles;
 using FtEstimate.MagicStates;
 using FtEstimate.Noise;
-using FtEstimate.Scenarios;
 
 namespace FtEstimate.Sizing;
 
@@ -15,7 +15,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     private const double SizeStep = 1.2;
 
     /// <summary>Once the tiles take less than this share of the allowed failure, a larger distance buys nothing.</summary>
-    private const double NegligibleShare = 1e-2;
+    private const double NegligibleShare = 0.05;
 
     /// <summary>At most this many factory counts are tried within one size step.</summary>
     private const int CountsPerSizeStep = 4;
@@ -26,22 +26,21 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     /// <summary>Unbeaten machines of one style, fewest atoms first; empty when none meets the goal.</summary>
     public IReadOnlyList<Candidate> Run()
     {
+        ImmutableArray<LeanerLayouts> layouts = LeanerLayouts.Of(space.Layouts, style);
         foreach (OperatingPoint point in space.Points)
         {
-            foreach (LogicLayout layout in space.Layouts)
+            foreach (LeanerLayouts layout in layouts)
             {
-                if (layout.Style == style)
-                {
-                    SearchDistances(point, layout);
-                }
+                SearchDistances(point, layout);
             }
         }
 
         return _unbeaten.Members;
     }
 
-    private void SearchDistances(OperatingPoint point, LogicLayout layout)
+    private void SearchDistances(OperatingPoint point, LeanerLayouts layouts)
     {
+        LogicLayout layout = layouts.Layout;
         for (int distance = SmallestWorthTrying(point, layout); distance <= SearchSpace.LargestDistance; distance += 2)
         {
             TrialBase bare = _trial.WithoutFactories(point, layout, distance);
@@ -51,13 +50,13 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 return;
             }
 
-            if (bare.PatchFailure >= limits.FailureAtMost)
+            if (bare.PatchFailure >= limits.FaultsAtMost)
             {
                 continue;
             }
 
-            SearchFactories(bare);
-            if (bare.PatchFailure < NegligibleShare * limits.FailureAtMost)
+            SearchFactories(bare, layouts.Leaner);
+            if (bare.PatchFailure < NegligibleShare * limits.FaultsAtMost)
             {
                 return;
             }
@@ -83,7 +82,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 break;
             }
 
-            if (bare.PatchFailure < limits.FailureAtMost)
+            if (bare.PatchFailure < limits.FaultsAtMost)
             {
                 return Math.Max(smallest, distance - stride + 2);
             }
@@ -92,7 +91,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         return smallest;
     }
 
-    private void SearchFactories(in TrialBase bare)
+    private void SearchFactories(in TrialBase bare, ImmutableArray<LogicLayout> leaner)
     {
         if (bare.LeastTStates <= 0)
         {
@@ -101,7 +100,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         }
 
         // the same for all layouts and distances, so that they share the catalogue's memory
-        double errorAtMost = limits.FailureAtMost / bare.LeastTStates;
+        double errorAtMost = limits.FaultsAtMost / bare.LeastTStates;
         for (int step = SizeStepOf(bare.TileAtoms); ; step++)
         {
             double low = Math.Pow(SizeStep, step);
@@ -116,15 +115,27 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
 
             double longestUsefulRun = _trial.RunAtLoad(bare, state.Times.RoundSeconds);
             double leastRoundSeconds = CandidateTrial.RoundAtLoad(bare, Math.Max(low, bare.TileAtoms));
+            double leanerRun = ShortestRun(bare, leaner, state.Times.RoundSeconds);
             bool moreIsUseful = false;
             foreach (Factory factory in factories.At(bare.Point, state, bare.Distance, errorAtMost))
             {
                 double supplyRounds = bare.LeastTStates * factory.RoundsPerOutput;
-                double useful = Math.Ceiling(supplyRounds * state.Times.RoundSeconds / longestUsefulRun);
+                double supplySeconds = supplyRounds * leastRoundSeconds;
+                double useful = space.Scenario.Method.FactoryCount
+                    ?? Math.Ceiling(supplyRounds * state.Times.RoundSeconds / longestUsefulRun);
                 double most = Math.Floor((high - bare.TileAtoms) / factory.Atoms);
                 double least = Math.Max(1, Math.Floor((low - bare.TileAtoms) / factory.Atoms) + 1);
                 moreIsUseful |= useful > most;
-                TryCounts(bare, factory, supplyRounds * leastRoundSeconds, least, Math.Min(most, useful));
+                if (space.Scenario.Method.FactoryCount is { } only)
+                {
+                    TryCounts(bare, factory, supplySeconds, Math.Max(least, only), Math.Min(most, only));
+                }
+                else
+                {
+                    // where supply sets the pace, a leaner layout with the same factories is as fast
+                    double fasterThanLeaner = Math.Floor(supplySeconds / leanerRun) + 1;
+                    TryCounts(bare, factory, supplySeconds, Math.Max(least, fasterThanLeaner), Math.Min(most, useful));
+                }
             }
 
             if (!moreIsUseful || bare.Atoms * (high / bare.TileAtoms) > limits.AtomsAtMost * SizeStep)
@@ -136,17 +147,6 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
 
     private void TryCounts(in TrialBase bare, Factory factory, double supplySecondsOfOne, double least, double most)
     {
-        if (space.Scenario.Method.FactoryCount is { } only)
-        {
-            // the scenario fixes the count: it counts as useful even where fewer would do
-            if (only >= least)
-            {
-                _trial.Try(bare, factory, only, _unbeaten);
-            }
-
-            return;
-        }
-
         if (least > most || Beaten(bare, factory, supplySecondsOfOne, least, most))
         {
             return;
@@ -166,35 +166,16 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     private bool Beaten(in TrialBase bare, Factory factory, double supplySecondsOfOne, double least, double most) =>
         _unbeaten.Beats(bare.Atoms + (factory.Atoms * least), Math.Max(bare.RunSeconds, supplySecondsOfOne / most));
 
-    private static int SizeStepOf(double sites) => (int)Math.Floor(Math.Log(sites) / Math.Log(SizeStep));
-}
-
-/// <summary>What every machine must keep to.</summary>
-/// <param name="FailureAtMost">Failure probability of one shot.</param>
-/// <param name="Each">Whether each contribution may use all of it.</param>
-/// <param name="AtomsAtMost">Atoms; infinite when not limited.</param>
-/// <param name="ElapsedAtMost">Elapsed seconds; infinite when not limited.</param>
-/// <param name="SupplyPerSecond">Atoms delivered per second; infinite when not limited.</param>
-internal sealed record SearchLimits(
-    double FailureAtMost,
-    bool Each,
-    double AtomsAtMost,
-    double ElapsedAtMost,
-    double SupplyPerSecond)
-{
-    /// <summary>The limits of a scenario.</summary>
-    public static SearchLimits Of(Scenario scenario) => new(
-        scenario.Goal.FailureProbability,
-        scenario.Method.FailureSplit == "each",
-        scenario.Goal.AtomsAtMost ?? double.PositiveInfinity,
-        scenario.Goal.RunSecondsAtMost ?? double.PositiveInfinity,
-        scenario.Machine.Supply.AtomsPerSecond ?? double.PositiveInfinity);
-
-    /// <summary>The same goal without limits on atoms, time and supply.</summary>
-    public SearchLimits WithoutResources() => this with
+    private double ShortestRun(in TrialBase bare, ImmutableArray<LogicLayout> layouts, double roundSeconds)
     {
-        AtomsAtMost = double.PositiveInfinity,
-        ElapsedAtMost = double.PositiveInfinity,
-        SupplyPerSecond = double.PositiveInfinity,
-    };
+        double shortest = double.PositiveInfinity;
+        foreach (LogicLayout layout in layouts)
+        {
+            shortest = Math.Min(shortest, _trial.RunAtLoad(bare with { Layout = layout }, roundSeconds));
+        }
+
+        return shortest;
+    }
+
+    private static int SizeStepOf(double sites) => (int)Math.Floor(Math.Log(sites) / Math.Log(SizeStep));
 }

@@ -27,7 +27,7 @@ public sealed record SearchSpace(
     public const int LargestDistance = 99;
 
     /// <summary>Exposures that shorten the round by less are not tried: the resolution of the search in time.</summary>
-    public const double WorthwhileShortening = 0.005;
+    public const double WorthwhileShortening = 0.01;
 
     /// <summary>The space a scenario leaves open, with the readout in use.</summary>
     /// <param name="scenario">The question; names of law, patch and synthesis are known to exist.</param>

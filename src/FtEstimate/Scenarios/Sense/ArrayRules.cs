@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using FtEstimate.Scenarios.Keys;
 
 namespace FtEstimate.Scenarios.Sense;
@@ -13,53 +14,58 @@ internal static class ArrayRules
     private static readonly string PulseGap = ReachKeys.MovedAtoms.PathOf(ReachKeys.PulseGap);
     private static readonly string ZoneRefill = ReachKeys.MovedAtoms.PathOf(ReachKeys.ZoneRefill);
 
-    private static readonly KeyDefinition[] BetweenSpecies =
+    private static readonly ImmutableArray<KeyDefinition> BetweenSpecies =
     [
         GateKeys.BetweenSpeciesError, GateKeys.BetweenSpeciesLoss, GateKeys.BetweenSpeciesTime,
     ];
 
-    public static IEnumerable<SenseFault> Check(ScenarioDraft draft) =>
-        [.. CzGate(draft), .. GateBetweenSpecies(draft), .. Decay(draft, T1, T2), .. Pauses(draft)];
+    public static void Check(ScenarioDraft draft, List<SenseFault> faults)
+    {
+        CzGate(draft, faults);
+        GateBetweenSpecies(draft, faults);
+        Decay(draft, T1, T2, faults);
+        Pauses(draft, faults);
+    }
 
     /// <summary>T2 is at most twice T1 (exact: pure dephasing only adds to what relaxation costs).</summary>
-    public static IEnumerable<SenseFault> Decay(ScenarioDraft draft, string t1Path, string t2Path)
+    public static void Decay(ScenarioDraft draft, string t1Path, string t2Path, List<SenseFault> faults)
     {
         if (draft.Number(t1Path) is double t1 && draft.Number(t2Path) is double t2 && t2 > 2 * t1)
         {
-            yield return new SenseFault(t2Path, $"T2 cannot exceed twice T1; expected at most {Plain.Number(2 * t1)} s, found {Plain.Number(t2)} s");
+            faults.Add(new SenseFault(t2Path, $"T2 cannot exceed twice T1; expected at most {Plain.Number(2 * t1)} s, found {Plain.Number(t2)} s"));
         }
     }
 
-    private static IEnumerable<SenseFault> CzGate(ScenarioDraft draft)
+    private static void CzGate(ScenarioDraft draft, List<SenseFault> faults)
     {
         if (!draft.Tables.Contains(GateKeys.Gates.Path))
         {
-            yield break;
+            return;
         }
 
         if (draft.Gives(CzError) && draft.Gives(CzRawError))
         {
-            yield return new SenseFault(CzRawError, "give cz_error or cz_raw_error, not both");
+            faults.Add(new SenseFault(CzRawError, "give cz_error or cz_raw_error, not both"));
         }
         else if (draft.Lacks(CzError) && draft.Lacks(CzRawError))
         {
-            yield return new SenseFault(CzError, "missing key; expected cz_error, or cz_raw_error with the loss in it");
+            faults.Add(new SenseFault(CzError, "missing key; expected cz_error, or cz_raw_error with the loss in it"));
         }
 
         if (draft.Number(CzRawError) is double raw && draft.Number(CzLoss) is double loss && loss > raw)
         {
-            yield return new SenseFault(
-                CzRawError, $"the raw error holds the loss, so it cannot be below cz_loss = {Plain.Number(loss)}; found {Plain.Number(raw)}");
+            faults.Add(new SenseFault(
+                CzRawError, $"the raw error holds the loss, so it cannot be below cz_loss = {Plain.Number(loss)}; found {Plain.Number(raw)}"));
         }
     }
 
-    private static IEnumerable<SenseFault> GateBetweenSpecies(ScenarioDraft draft)
+    private static void GateBetweenSpecies(ScenarioDraft draft, List<SenseFault> faults)
     {
         bool isUsed = draft.HasSchemeOfKind("second_species");
-        bool isBegun = BetweenSpecies.Any(key => draft.Gives(GateKeys.Gates.PathOf(key)));
+        bool isBegun = draft.FirstGiven(GateKeys.Gates.Path, BetweenSpecies) is not null;
         if (!draft.Tables.Contains(GateKeys.Gates.Path) || !(isUsed || isBegun))
         {
-            yield break;
+            return;
         }
 
         string why = isUsed ? "a second species needs the gate between the species" : "the gate between the species is given in part only";
@@ -68,16 +74,16 @@ internal static class ArrayRules
             string path = GateKeys.Gates.PathOf(key);
             if (draft.Lacks(path))
             {
-                yield return new SenseFault(path, $"missing key; {why}");
+                faults.Add(new SenseFault(path, $"missing key; {why}"));
             }
         }
     }
 
-    private static IEnumerable<SenseFault> Pauses(ScenarioDraft draft)
+    private static void Pauses(ScenarioDraft draft, List<SenseFault> faults)
     {
         if (draft.Gives(PulseGap) && draft.Gives(ZoneRefill))
         {
-            yield return new SenseFault(ZoneRefill, "give pulse_gap_us or zone_refill_us, not both");
+            faults.Add(new SenseFault(ZoneRefill, "give pulse_gap_us or zone_refill_us, not both"));
         }
     }
 }

@@ -12,11 +12,11 @@ internal static class FactoryRules
     private static readonly string Factory = MethodKeys.Method.PathOf(MethodKeys.Factory);
     private static readonly string[] Protocols = ["15-to-1", "20-to-4", "8-to-ccz"];
 
-    public static IEnumerable<SenseFault> Check(ScenarioDraft draft)
+    public static void Check(ScenarioDraft draft, List<SenseFault> faults)
     {
         if (draft.Text(Factory) is string text && text != Tile && Problem(text) is string problem)
         {
-            yield return new SenseFault(Factory, $"{problem}; {Expected}");
+            faults.Add(new SenseFault(Factory, $"{problem}; {Expected}"));
         }
     }
 

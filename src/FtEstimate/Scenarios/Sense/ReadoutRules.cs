@@ -15,52 +15,64 @@ internal static class ReadoutRules
         DetectionKeys.Signal, DetectionKeys.Background, DetectionKeys.Depump, DetectionKeys.Loss,
     ];
 
-    public static IEnumerable<SenseFault> Check(ScenarioDraft draft)
+    public static void Check(ScenarioDraft draft, List<SenseFault> faults)
     {
         if (!draft.Tables.Contains(ReadoutKeys.Path))
         {
-            return [];
+            return;
         }
 
-        List<SenseFault> faults = [.. InUse(draft), .. OneWayOfDetection(draft, Detection)];
+        InUse(draft, faults);
+        OneWayOfDetection(draft, Detection, faults);
+        List<SenseFault> lacking = [];
         foreach (string scheme in draft.SchemeTables())
         {
-            faults.AddRange(OneWayOfDetection(draft, scheme));
-            faults.AddRange(CompleteDetection(draft, scheme));
-            faults.AddRange(draft.KindOf(scheme) switch
+            OneWayOfDetection(draft, scheme, faults);
+            CompleteDetection(draft, scheme, lacking);
+            switch (draft.KindOf(scheme))
             {
-                "shelved" => ArrayRules.Decay(
-                    draft, $"{scheme}.{ReadoutKeys.ShelvedT1.Name}", $"{scheme}.{ReadoutKeys.ShelvedT2.Name}"),
-                "moved_apart" => WayApart(draft, scheme),
-                _ => [],
-            });
+                case "shelved":
+                    ArrayRules.Decay(draft, $"{scheme}.{ReadoutKeys.ShelvedT1.Name}", $"{scheme}.{ReadoutKeys.ShelvedT2.Name}", faults);
+                    break;
+                case "moved_apart":
+                    WayApart(draft, scheme, faults);
+                    break;
+            }
         }
 
-        // what [detection] lacks is missed by every scheme that relies on it
-        return faults.DistinctBy(fault => fault.Path);
+        if (lacking.Count > 0)
+        {
+            // what [detection] lacks is missed by every scheme that relies on it
+            faults.AddRange(lacking.DistinctBy(fault => fault.Path));
+        }
     }
 
-    private static IEnumerable<SenseFault> InUse(ScenarioDraft draft)
+    private static void InUse(ScenarioDraft draft, List<SenseFault> faults)
     {
-        string[] names = [.. draft.SchemeTables().Select(table => table[(ReadoutKeys.Path.Length + 1)..])];
-        if (names.Length == 0)
+        List<string> names = [];
+        foreach (string table in draft.SchemeTables())
         {
-            yield return new SenseFault(ReadoutKeys.Path, "no readout scheme is described; expected a table [readout.NAME] with a kind");
+            names.Add(table[(ReadoutKeys.Path.Length + 1)..]);
+        }
+
+        if (names.Count == 0)
+        {
+            faults.Add(new SenseFault(ReadoutKeys.Path, "no readout scheme is described; expected a table [readout.NAME] with a kind"));
         }
         else if (draft.Text(Use) is string use && !names.Contains(use) && !draft.IsUnreadable($"{ReadoutKeys.Path}.{use}"))
         {
-            yield return new SenseFault(Use, $"no scheme is called \"{use}\"; described are {string.Join(", ", names)}");
+            faults.Add(new SenseFault(Use, $"no scheme is called \"{use}\"; described are {string.Join(", ", names)}"));
         }
     }
 
-    private static IEnumerable<SenseFault> OneWayOfDetection(ScenarioDraft draft, string table)
+    private static void OneWayOfDetection(ScenarioDraft draft, string table, List<SenseFault> faults)
     {
-        KeyDefinition? counted = DetectionKeys.Counting.FirstOrDefault(key => draft.Gives($"{table}.{key.Name}"));
-        KeyDefinition? stated = DetectionKeys.Stated.FirstOrDefault(key => draft.Gives($"{table}.{key.Name}"));
+        KeyDefinition? counted = draft.FirstGiven(table, DetectionKeys.Counting);
+        KeyDefinition? stated = draft.FirstGiven(table, DetectionKeys.Stated);
         if (counted is not null && stated is not null)
         {
-            yield return new SenseFault(
-                $"{table}.{stated.Name}", $"{stated.Name} is a measured error and {counted.Name} a photon count; a detector is known by one or the other");
+            faults.Add(new SenseFault(
+                $"{table}.{stated.Name}", $"{stated.Name} is a measured error and {counted.Name} a photon count; a detector is known by one or the other"));
         }
 
         string mean = $"{table}.{DetectionKeys.FlipError.Name}";
@@ -68,32 +80,32 @@ internal static class ReadoutRules
         string bright = $"{table}.{DetectionKeys.BrightFlip.Name}";
         if (draft.Gives(mean) && (draft.Gives(dark) || draft.Gives(bright)))
         {
-            yield return new SenseFault(mean, "give flip_error, or dark_flip and bright_flip, not both");
+            faults.Add(new SenseFault(mean, "give flip_error, or dark_flip and bright_flip, not both"));
         }
         else if ((draft.Gives(dark) && draft.Lacks(bright)) || (draft.Gives(bright) && draft.Lacks(dark)))
         {
-            yield return new SenseFault(draft.Gives(dark) ? bright : dark, "missing key; dark_flip and bright_flip go together");
+            faults.Add(new SenseFault(draft.Gives(dark) ? bright : dark, "missing key; dark_flip and bright_flip go together"));
         }
     }
 
-    private static IEnumerable<SenseFault> CompleteDetection(ScenarioDraft draft, string scheme)
+    private static void CompleteDetection(ScenarioDraft draft, string scheme, List<SenseFault> faults)
     {
         bool ownFlips = StatesFlips(draft, scheme);
         bool ownCounts = !draft.Lacks($"{scheme}.{DetectionKeys.Signal.Name}");
         if (draft.KindOf(scheme) == "second_species" && !ownFlips && !ownCounts)
         {
-            yield return new SenseFault(
-                $"{scheme}.{DetectionKeys.Signal.Name}", "missing key; another species has a signal of its own, or a flip_error of its own");
-            yield break;
+            faults.Add(new SenseFault(
+                $"{scheme}.{DetectionKeys.Signal.Name}", "missing key; another species has a signal of its own, or a flip_error of its own"));
+            return;
         }
 
         bool states = ownFlips || (!ownCounts && StatesFlips(draft, Detection));
         if (!states && !ownCounts && draft.Lacks($"{Detection}.{DetectionKeys.Signal.Name}"))
         {
-            yield return new SenseFault(
+            faults.Add(new SenseFault(
                 $"{Detection}.{DetectionKeys.Signal.Name}",
-                "missing key; expected signal_counts_per_ms with the other counts, or flip_error with loss_per_look and exposure_us");
-            yield break;
+                "missing key; expected signal_counts_per_ms with the other counts, or flip_error with loss_per_look and exposure_us"));
+            return;
         }
 
         string owner = ownFlips || ownCounts ? scheme : Detection;
@@ -102,7 +114,7 @@ internal static class ReadoutRules
             if (draft.Lacks($"{scheme}.{key.Name}") && draft.Lacks($"{Detection}.{key.Name}"))
             {
                 string companion = states ? "a measured flip error" : "a signal";
-                yield return new SenseFault($"{owner}.{key.Name}", $"missing key; needed beside {companion}");
+                faults.Add(new SenseFault($"{owner}.{key.Name}", $"missing key; needed beside {companion}"));
             }
         }
 
@@ -110,30 +122,30 @@ internal static class ReadoutRules
         string exposurePath = $"{exposure}.{DetectionKeys.Exposure.Name}";
         if (states && draft.Number(exposurePath) is null && !draft.IsUnreadable(exposurePath))
         {
-            yield return new SenseFault(
+            faults.Add(new SenseFault(
                 draft.Gives(exposurePath) ? exposurePath : $"{owner}.{DetectionKeys.Exposure.Name}",
-                "a measured flip error holds for one exposure; expected a number");
+                "a measured flip error holds for one exposure; expected a number"));
         }
     }
 
     private static bool StatesFlips(ScenarioDraft draft, string table) =>
         !draft.Lacks($"{table}.{DetectionKeys.FlipError.Name}") || !draft.Lacks($"{table}.{DetectionKeys.DarkFlip.Name}");
 
-    private static IEnumerable<SenseFault> WayApart(ScenarioDraft draft, string scheme)
+    private static void WayApart(ScenarioDraft draft, string scheme, List<SenseFault> faults)
     {
         string distance = $"{scheme}.{ReadoutKeys.Distance.Name}";
         string exchange = $"{scheme}.{ReadoutKeys.ExchangeTime.Name}";
         if (draft.Gives(distance) && draft.Gives(exchange))
         {
-            yield return new SenseFault(exchange, "give distance_um or exchange_time_us, not both");
+            faults.Add(new SenseFault(exchange, "give distance_um or exchange_time_us, not both"));
         }
         else if (draft.Lacks(distance) && draft.Lacks(exchange))
         {
-            yield return new SenseFault(distance, "missing key; expected distance_um, or exchange_time_us");
+            faults.Add(new SenseFault(distance, "missing key; expected distance_um, or exchange_time_us"));
         }
         else if (draft.Gives(distance) && draft.Text(ReachKind) == ReachKeys.SteeredBeams.SelectedWhen)
         {
-            yield return new SenseFault(distance, "steered beams move no atoms, so a distance gives no time; expected exchange_time_us");
+            faults.Add(new SenseFault(distance, "steered beams move no atoms, so a distance gives no time; expected exchange_time_us"));
         }
     }
 }

@@ -14,16 +14,16 @@ internal static class RunningRules
         GateKeys.CzLoss.Name, GateKeys.BetweenSpeciesLoss.Name, ReachKeys.MoveLoss.Name, DetectionKeys.Loss.Name, DetectionKeys.LossPerLook.Name,
     };
 
-    public static IEnumerable<SenseFault> Check(ScenarioDraft draft)
+    public static void Check(ScenarioDraft draft, List<SenseFault> faults)
     {
         if (draft.Gives(MeanHours) && draft.Lacks(Restart))
         {
-            yield return new SenseFault(Restart, "missing key; needed with mean_hours_between_stops");
+            faults.Add(new SenseFault(Restart, "missing key; needed with mean_hours_between_stops"));
         }
 
         if (LosesAtoms(draft) is not string loss)
         {
-            yield break;
+            return;
         }
 
         foreach (KeyDefinition key in (KeyDefinition[])[OperationKeys.DataLossCheck, OperationKeys.DataLossCheckEvery])
@@ -31,7 +31,7 @@ internal static class RunningRules
             string path = OperationKeys.Running.PathOf(key);
             if (draft.Lacks(path))
             {
-                yield return new SenseFault(path, $"missing key; {loss} loses atoms, so say how lost data atoms are found, and how often");
+                faults.Add(new SenseFault(path, $"missing key; {loss} loses atoms, so say how lost data atoms are found, and how often"));
             }
         }
     }

@@ -15,16 +15,16 @@ internal static class ShapeRules
         .. NeededOnABench, ReachKeys.Cycle, DetectionKeys.Detection, OperationKeys.Supply,
     ];
 
-    public static IEnumerable<SenseFault> Check(ScenarioDraft draft)
+    public static void Check(ScenarioDraft draft, List<SenseFault> faults)
     {
         if (draft.LacksTable(GoalKeys.Goal.Path))
         {
-            yield return Missing(GoalKeys.Goal);
+            faults.Add(Missing(GoalKeys.Goal));
         }
 
         if (!draft.Tables.Contains(MachineKeys.Top.Path) || draft.IsUnreadable(MachineKeys.Top.Path))
         {
-            yield break;
+            return;
         }
 
         bool isAbstract = !draft.LacksTable(MachineKeys.Abstract.Path);
@@ -32,11 +32,11 @@ internal static class ShapeRules
         {
             if (isAbstract && draft.Tables.Contains(table.Path))
             {
-                yield return new SenseFault(table.Path, "an abstract machine has no bench tables; leave out this table or [abstract]");
+                faults.Add(new SenseFault(table.Path, "an abstract machine has no bench tables; leave out this table or [abstract]"));
             }
             else if (!isAbstract && draft.LacksTable(table.Path))
             {
-                yield return Missing(table);
+                faults.Add(Missing(table));
             }
         }
     }

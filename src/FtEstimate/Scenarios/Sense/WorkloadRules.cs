@@ -15,42 +15,54 @@ internal static class WorkloadRules
         WorkloadKeys.TStates, WorkloadKeys.Toffolis, WorkloadKeys.Rotations, WorkloadKeys.LogicalLayers,
     ];
 
-    public static IEnumerable<SenseFault> Check(ScenarioDraft draft)
+    public static void Check(ScenarioDraft draft, List<SenseFault> faults)
     {
         if (!draft.Tables.Contains(WorkloadKeys.Top.Path) || draft.IsUnreadable(WorkloadKeys.Top.Path))
         {
-            yield break;
+            return;
         }
 
         bool isCounted = draft.Tables.Contains(Counts);
         if (isCounted && draft.Tables.Contains(Generate))
         {
-            yield return new SenseFault(Generate, "give [counts] or [generate], not both");
+            faults.Add(new SenseFault(Generate, "give [counts] or [generate], not both"));
         }
         else if (draft.LacksTable(Counts) && draft.LacksTable(Generate))
         {
-            yield return new SenseFault(WorkloadKeys.Top.Path, "missing table; expected [counts] or [generate]");
+            faults.Add(new SenseFault(WorkloadKeys.Top.Path, "missing table; expected [counts] or [generate]"));
         }
 
-        if (isCounted && !Work.Any(key => IsSomething(draft, WorkloadKeys.Counts.PathOf(key))))
+        if (isCounted && !HasWork(draft))
         {
-            yield return new SenseFault(Counts, "nothing to run: t_states, toffolis, rotations and logical_layers are all 0");
+            faults.Add(new SenseFault(Counts, "nothing to run: t_states, toffolis, rotations and logical_layers are all 0"));
         }
 
         if (draft.Text(WorkloadKeys.SpinLattice.PathOf(WorkloadKeys.Family)) != WorkloadKeys.SpinLattice.SelectedWhen)
         {
-            yield break;
+            return;
         }
 
         if (draft.Gives(Steps) && draft.Gives(TrotterError))
         {
-            yield return new SenseFault(Steps, "give trotter_error or steps, not both");
+            faults.Add(new SenseFault(Steps, "give trotter_error or steps, not both"));
         }
         else if (draft.Lacks(Steps) && draft.Lacks(TrotterError))
         {
-            yield return new SenseFault(TrotterError, "missing key; expected trotter_error, or steps");
+            faults.Add(new SenseFault(TrotterError, "missing key; expected trotter_error, or steps"));
         }
     }
 
-    private static bool IsSomething(ScenarioDraft draft, string path) => draft.Number(path) is double number ? number > 0 : draft.IsUnreadable(path);
+    private static bool HasWork(ScenarioDraft draft)
+    {
+        foreach (KeyDefinition key in Work)
+        {
+            string path = WorkloadKeys.Counts.PathOf(key);
+            if (draft.Number(path) > 0 || draft.IsUnreadable(path))
+            {
+                return true;
+            }
+        }
+
+        return false;
+    }
 }
