@@ -106,8 +106,9 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             double low = Math.Pow(SizeStep, step);
             double high = low * SizeStep;
             OperatingState state = bare.Point.At(MachineLoad.Of(high, bare.Distance));
+            OperatingState moving = CandidateTrial.StateAt(bare.Point, bare.Layout, bare.Distance, high);
             bool tooMuch = state.Strength.Worse >= 1
-                || AtomSupply.DemandPerSecond(low, bare.Point, state) > limits.SupplyPerSecond;
+                || AtomSupply.DemandPerSecond(low, bare.Point, moving) > limits.SupplyPerSecond;
             if (tooMuch)
             {
                 return;
@@ -122,7 +123,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 double supplyRounds = bare.LeastTStates * factory.RoundsPerOutput;
                 double supplySeconds = supplyRounds * leastRoundSeconds;
                 double useful = space.Scenario.Method.FactoryCount
-                    ?? Math.Ceiling(supplyRounds * state.Times.RoundSeconds / longestUsefulRun);
+                    ?? Math.Ceiling(supplyRounds * moving.Times.RoundSeconds / longestUsefulRun);
                 double most = Math.Floor((high - bare.TileAtoms) / factory.Atoms);
                 double least = Math.Max(1, Math.Floor((low - bare.TileAtoms) / factory.Atoms) + 1);
                 moreIsUseful |= useful > most;
