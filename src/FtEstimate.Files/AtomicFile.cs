@@ -47,6 +47,22 @@ public static class AtomicFile
         }
     }
 
+    /// <summary>Makes a folder unless it exists.</summary>
+    /// <param name="path">The folder.</param>
+    /// <returns>Null, or why it could not be made.</returns>
+    public static Fault? MakeFolder(string path)
+    {
+        try
+        {
+            Directory.CreateDirectory(path);
+            return null;
+        }
+        catch (Exception problem) when (problem is IOException or UnauthorizedAccessException or ArgumentException or NotSupportedException)
+        {
+            return new Fault(path, 0, 0, "", $"cannot be made: {Reason(problem)}");
+        }
+    }
+
     private static string Reason(Exception problem) => problem switch
     {
         DirectoryNotFoundException => "its folder does not exist",

@@ -1,3 +1,5 @@
+using System.Collections.Immutable;
+
 namespace FtEstimate.Files.Comparisons;
 
 /// <summary>A published figure to hold ours against.</summary>
@@ -19,3 +21,8 @@ public sealed record Comparison(PublishedFigure Figure, double Ours)
     /// <summary>Relative deviation of ours from the published one.</summary>
     public double Deviation => (Ours - Figure.Published) / Figure.Published;
 }
+
+/// <summary>The outcome of reading a table of published figures.</summary>
+/// <param name="Comparisons">Our figures beside the published ones, in the order of the table.</param>
+/// <param name="Faults">What is wrong with the table.</param>
+public sealed record ComparisonReading(ImmutableArray<Comparison> Comparisons, ImmutableArray<Fault> Faults);

@@ -13,14 +13,13 @@ public static class ComparisonTable
 
     /// <summary>Reads the table in a folder and computes our side.</summary>
     /// <param name="folder">The folder with the table and its scenarios.</param>
-    /// <returns>The comparisons, or what is wrong with the table.</returns>
-    public static (ImmutableArray<Comparison> Comparisons, ImmutableArray<Fault> Faults) Read(string folder)
+        public static ComparisonReading Read(string folder)
     {
         string path = Path.Combine(folder, FileName);
         InputText content = InputText.Read(path);
         if (content.Text is null)
         {
-            return ([], [new Fault(path, content.Line, 0, "", content.Problem ?? "unreadable")]);
+            return new ComparisonReading([], [new Fault(path, content.Line, 0, "", content.Problem ?? "unreadable")]);
         }
 
         var comparisons = ImmutableArray.CreateBuilder<Comparison>();
@@ -56,7 +55,7 @@ public static class ComparisonTable
             }
         }
 
-        return (comparisons.ToImmutable(), faults.ToImmutable());
+        return new ComparisonReading(comparisons.ToImmutable(), faults.ToImmutable());
     }
 
     /// <summary>Splits a line at commas outside double quotes; a doubled quote inside quotes stands for one.</summary>

@@ -9,6 +9,9 @@ namespace FtEstimate.MagicStates;
 /// </remarks>
 public static class TileFactory
 {
+    /// <summary>How a scenario file names it.</summary>
+    public const string ScenarioName = "tile-15-to-1";
+
     /// <summary>Tiles it takes.</summary>
     public const int Tiles = 11;
 

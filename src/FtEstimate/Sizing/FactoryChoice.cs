@@ -10,14 +10,11 @@ namespace FtEstimate.Sizing;
 /// <param name="catalogue">The catalogue, which remembers what it has evaluated.</param>
 internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogue)
 {
-    /// <summary>How a scenario names the tile factory.</summary>
-    public const string TileFactoryName = "tile-15-to-1";
-
     private readonly FactoryDesign? _design =
         FactoryDesign.TryParse(space.Scenario.Method.Factory, out FactoryDesign? design, out _) ? design : null;
 
     /// <summary>Whether factories are tiles of the data distance, whose logical errors count with those of all tiles.</summary>
-    public bool CountsAsTiles => space.Scenario.Method.Factory == TileFactoryName;
+    public bool CountsAsTiles => space.Scenario.Method.Factory == TileFactory.ScenarioName;
 
     /// <summary>Factories at the noise rounded up to the catalogue's grid, so that neighbouring sizes share an evaluation.</summary>
     /// <param name="point">Readout and exposure.</param>
