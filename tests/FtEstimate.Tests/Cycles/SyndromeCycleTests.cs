@@ -61,7 +61,9 @@ public sealed class SyndromeCycleTests
         {
             SyndromeCycle cycle = BenchMachine.Cycle(array);
             MachineLoad larger = new(load.DataAtoms * growth, load.CheckSites * growth, load.PairsPerLayer * growth);
-            return cycle.Times(larger).RoundSeconds >= cycle.Times(load).RoundSeconds;
+
+            // where a long readout sets the pace both rounds are the same up to rounding
+            return cycle.Times(larger).RoundSeconds >= cycle.Times(load).RoundSeconds * (1 - 1e-12);
         });
 
     [Theory]

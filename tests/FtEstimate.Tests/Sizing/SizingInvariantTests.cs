@@ -1,6 +1,6 @@
 using CsCheck;
-using FtEstimate.MagicStates;
 using FtEstimate.Machines;
+using FtEstimate.MagicStates;
 using FtEstimate.Scenarios;
 using FtEstimate.Sizing;
 using FtEstimate.Tests.Cycles;
