@@ -13,7 +13,8 @@ public sealed class SizingInvariantTests
 {
     /// <summary>
     /// The search walks sizes in steps of 20 % with four factory counts in each, so neighbouring machines differ by up to 5 %, and
-    /// which of them are tried shifts with the input. Mostly another machine fills the gap: in 1,500 comparisons none gained more than 0.1 %.
+    /// which of them are tried shifts with the input. Mostly another machine fills the gap: of 860
+    /// random machines, each made worse in up to six ways, none gained more than 0.1 %.
     /// </summary>
     private const double Resolution = 0.01;
 
