@@ -10,10 +10,10 @@ namespace FtEstimate.Cycles;
 /// </summary>
 public static class PhotonStatistics
 {
-    /// <summary>Counts beyond which the dark check is never found: mean plus this many standard deviations and a margin.</summary>
-    private const double DarkTailDeviations = 9;
+    /// <summary>Counts beyond which a Poisson law is never found: mean plus this many standard deviations and a margin.</summary>
+    private const double TailDeviations = 9;
 
-    private const int DarkTailMargin = 25;
+    private const int TailMargin = 25;
 
     /// <summary>The reading at the threshold with the smallest mean error.</summary>
     /// <param name="detector">Rates in counts or events per second.</param>
@@ -56,7 +56,7 @@ public static class PhotonStatistics
     public static double[] DarkCounts(PhotonCounting detector, int atoms, double exposureSeconds, int length)
     {
         double[] background = Poisson(detector.BackgroundPerSecond * exposureSeconds, length);
-        if (detector.BrightenPerSecond <= 0)
+        if (detector.BrightenPerSecond <= 0 || detector.SignalPerSecond <= 0)
         {
             return background;
         }
@@ -69,7 +69,7 @@ public static class PhotonStatistics
     public static int HistogramLength(PhotonCounting detector, int atoms, double exposureSeconds)
     {
         double dark = detector.BackgroundPerSecond * exposureSeconds;
-        double cut = dark + (DarkTailDeviations * Math.Sqrt(dark)) + DarkTailMargin;
+        double cut = UpperEnd(dark);
         if (detector.BrightenPerSecond > 0)
         {
             cut = Math.Max(cut, dark + (atoms * detector.SignalPerSecond * exposureSeconds));
@@ -77,6 +77,9 @@ public static class PhotonStatistics
 
         return (int)Math.Min(cut, 5_000) + 1;
     }
+
+    /// <summary>Counts that a Poisson law of this mean practically never exceeds.</summary>
+    private static int UpperEnd(double mean) => (int)(mean + (TailDeviations * Math.Sqrt(mean)) + TailMargin);
 
     /// <summary>Poisson probabilities of 0 … length−1.</summary>
     public static double[] Poisson(double mean, int length)
@@ -115,21 +118,28 @@ public static class PhotonStatistics
         return counts;
     }
 
-    /// <summary>The mirror image: a dark atom that turns bright at rate γ, e^{−γt}[n=0] + γe^{−γt} sⁿ/(s−γ)ⁿ⁺¹ P(n+1, (s−γ)t), s > γ.</summary>
+    /// <summary>
+    /// The mirror image: a dark atom that turns bright at rate γ, e^{−γt}[n=0] + J(n), J(n) = ∫γe^{−γ(t−u)} Pois(n; su) du. Integrating by parts gives
+    /// s·J(n−1) = (s−γ)·J(n) + γ·Pois(n; st), which loses no digits downwards; upwards, and in the closed form by gamma functions, it does as γ nears s.
+    /// An atom that brightens faster than it counts is as good as bright: γ is cut off at s.
+    /// </summary>
     private static double[] CountsAfterJump(double signal, double brighten, double seconds, int length)
     {
         double[] counts = new double[length];
-        double stays = Math.Exp(-brighten * seconds);
-        double rate = Math.Max(signal - brighten, 1e-9 * signal);
-        double[] reached = PoissonAbove(rate * seconds, length);
-        double weight = brighten * stays / rate;
-        for (int n = 0; n < length; n++)
+        double bright = signal * seconds;
+        double rate = Math.Min(brighten, signal);
+        double[] poisson = Poisson(bright, Math.Max(length, UpperEnd(bright)) + 1);
+        double after = 0;
+        for (int n = poisson.Length - 1; n > 0; n--)
         {
-            counts[n] = weight * reached[n];
-            weight *= signal / rate;
+            after = ((1 - (rate / signal)) * after) + (rate / signal * poisson[n]);
+            if (n <= length)
+            {
+                counts[n - 1] = after;
+            }
         }
 
-        counts[0] += stays;
+        counts[0] += Math.Exp(-rate * seconds);
         return counts;
     }
 

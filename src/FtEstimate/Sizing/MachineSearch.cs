@@ -14,7 +14,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     /// <summary>Machine sizes are walked in steps of this ratio; within a step all factories see the noise of its upper end.</summary>
     private const double SizeStep = 1.2;
 
-    /// <summary>Once the tiles take less than this share of the allowed failure, a larger distance buys nothing.</summary>
+    /// <summary>Once the tiles take less than this share of the allowed failure even in the slowest run, a larger distance buys nothing.</summary>
     private const double NegligibleShare = 0.05;
 
     /// <summary>At most this many factory counts are tried within one size step.</summary>
@@ -55,8 +55,8 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 continue;
             }
 
-            SearchFactories(bare, layouts.Leaner);
-            if (bare.PatchFailure < NegligibleShare * limits.FaultsAtMost)
+            double slowest = SearchFactories(bare, layouts.Leaner);
+            if (bare.PatchFailure * slowest <= NegligibleShare * limits.FaultsAtMost * bare.RunSeconds)
             {
                 return;
             }
@@ -91,12 +91,14 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         return smallest;
     }
 
-    private void SearchFactories(in TrialBase bare, ImmutableArray<LogicLayout> leaner)
+    /// <summary>Tries factories and counts; returns the longest run among them, since the patches of a slow machine fail more often.</summary>
+    private double SearchFactories(in TrialBase bare, ImmutableArray<LogicLayout> leaner)
     {
+        double slowest = bare.RunSeconds;
         if (bare.LeastTStates <= 0)
         {
             _trial.Try(bare, null, 0, _unbeaten);
-            return;
+            return slowest;
         }
 
         // the same for all layouts and distances, so that they share the catalogue's memory
@@ -106,11 +108,12 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             double low = Math.Pow(SizeStep, step);
             double high = low * SizeStep;
             OperatingState state = bare.Point.At(MachineLoad.Of(high, bare.Distance));
+            OperatingState moving = CandidateTrial.StateAt(bare.Point, bare.Layout, bare.Distance, high);
             bool tooMuch = state.Strength.Worse >= 1
-                || AtomSupply.DemandPerSecond(low, bare.Point, state) > limits.SupplyPerSecond;
+                || AtomSupply.DemandPerSecond(low, bare.Point, moving) > limits.SupplyPerSecond;
             if (tooMuch)
             {
-                return;
+                return slowest;
             }
 
             double longestUsefulRun = _trial.RunAtLoad(bare, state.Times.RoundSeconds);
@@ -122,7 +125,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 double supplyRounds = bare.LeastTStates * factory.RoundsPerOutput;
                 double supplySeconds = supplyRounds * leastRoundSeconds;
                 double useful = space.Scenario.Method.FactoryCount
-                    ?? Math.Ceiling(supplyRounds * state.Times.RoundSeconds / longestUsefulRun);
+                    ?? Math.Ceiling(supplyRounds * moving.Times.RoundSeconds / longestUsefulRun);
                 double most = Math.Floor((high - bare.TileAtoms) / factory.Atoms);
                 double least = Math.Max(1, Math.Floor((low - bare.TileAtoms) / factory.Atoms) + 1);
                 moreIsUseful |= useful > most;
@@ -134,13 +137,15 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 {
                     // where supply sets the pace, a leaner layout with the same factories is as fast
                     double fasterThanLeaner = Math.Floor(supplySeconds / leanerRun) + 1;
-                    TryCounts(bare, factory, supplySeconds, Math.Max(least, fasterThanLeaner), Math.Min(most, useful));
+                    double fewest = Math.Max(least, fasterThanLeaner);
+                    TryCounts(bare, factory, supplySeconds, fewest, Math.Min(most, useful));
+                    slowest = fewest <= most ? Math.Max(slowest, supplySeconds / fewest) : slowest;
                 }
             }
 
             if (!moreIsUseful || bare.Atoms * (high / bare.TileAtoms) > limits.AtomsAtMost * SizeStep)
             {
-                return;
+                return slowest;
             }
         }
     }

@@ -31,23 +31,30 @@ public sealed class MachineSizing(FactoryCatalogue catalogue)
             return new SizingResult(space, null, null, [], NoAnswerFinder.Explain(space, factories, limits));
         }
 
-        MachineDetail detail = new(space, factories);
-        SizedMachine[] picks = [.. perStyle.Select(found => detail.Of(Preferred(found, scenario.Goal.Prefer)))];
-        Candidate best = Preferred([.. perStyle.Select(found => Preferred(found, scenario.Goal.Prefer))], scenario.Goal.Prefer);
-        SizedMachine chosen = picks.First(pick => pick.Layout == best.Layout && pick.Atoms.Total == best.Atoms);
         UnbeatenSet merged = new();
         foreach (Candidate candidate in perStyle.SelectMany(found => found))
         {
             merged.Offer(candidate);
         }
 
-        return new SizingResult(
-            space,
-            chosen,
-            picks.FirstOrDefault(pick => pick != chosen),
-            [.. TradeOff.Thin(merged.Members, best).Select(detail.Of)],
-            null);
+        MachineDetail detail = new(space, factories);
+        Preference prefer = scenario.Goal.Prefer;
+        SizedMachine[] rows = [.. TradeOff.Thin(merged.Members, Preferred(merged.Members, prefer)).Select(detail.Of)];
+
+        // at the exact noise of the factories run times shift by a little: enough to overtake a neighbour
+        ImmutableArray<SizedMachine> unbeaten = [.. rows.Where(row => !rows.Any(other => Beats(other, row)))];
+        SizedMachine best = unbeaten.MinBy(machine => Measure(machine, prefer))!;
+        SizedMachine? otherStyle = perStyle
+            .Select(found => Preferred(found, prefer))
+            .Where(candidate => candidate.Layout.Style != best.Layout.Style)
+            .Select(detail.Of)
+            .FirstOrDefault();
+        return new SizingResult(space, best, otherStyle, unbeaten, null);
     }
+
+    private static bool Beats(SizedMachine one, SizedMachine other) =>
+        one.Atoms.Total <= other.Atoms.Total && one.RunSeconds <= other.RunSeconds
+        && (one.Atoms.Total < other.Atoms.Total || one.RunSeconds < other.RunSeconds);
 
     /// <summary>The candidate with the smallest preferred measure; ties go to fewer atoms, then to the shorter run.</summary>
     internal static Candidate Preferred(IReadOnlyList<Candidate> candidates, Preference preference)
@@ -66,11 +73,17 @@ public sealed class MachineSizing(FactoryCatalogue catalogue)
     }
 
     /// <summary>What a preference wants small.</summary>
-    internal static double Measure(in Candidate candidate, Preference preference) => preference switch
+    internal static double Measure(in Candidate candidate, Preference preference) =>
+        Measure(candidate.Atoms, candidate.RunSeconds, preference);
+
+    private static double Measure(SizedMachine machine, Preference preference) =>
+        Measure(machine.Atoms.Total, machine.RunSeconds, preference);
+
+    private static double Measure(double atoms, double runSeconds, Preference preference) => preference switch
     {
-        Preference.FewestAtoms => candidate.Atoms,
-        Preference.ShortestRun => candidate.RunSeconds,
-        _ => candidate.Atoms * candidate.RunSeconds,
+        Preference.FewestAtoms => atoms,
+        Preference.ShortestRun => runSeconds,
+        _ => atoms * runSeconds,
     };
 }
 
