@@ -154,10 +154,10 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         double lookLater = Cycle.Scheme is MovedApart { ReadInRound: false } ? Cycle.Reading.LossPerLook : 0;
         double data = loss.PerGateSlot + (loss.DataPerRound / SyndromeCycle.Layers);
         double check = loss.PerGateSlot + (Math.Max(loss.CheckPerRound - lookLater, 0) / SyndromeCycle.Layers);
-        if (Cycle.Scheme.Detector.TellsLoss)
+        bool tells = Cycle.Scheme.Detector.TellsLoss;
+        if (tells || _lossCheck == LossCheckMethod.ExtraCheck)
         {
             sink.Add("Loss of data atoms", data, SyndromeCycle.Layers, LossWeights.Told(data, Array.Coherence.LossCheck.EveryRounds));
-            sink.Add("Loss of check atoms", check, SyndromeCycle.Layers, LossWeights.Told(check, 1));
         }
         else
         {
@@ -165,6 +165,14 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
             double roundsUntilReplaced = (Array.Coherence.LossCheck.EveryRounds - 1) / 2;
             NoiseStrength random = Weights.DataEvent(PauliChannel.Depolarising(0.75 * SyndromeCycle.Layers * data * roundsUntilReplaced));
             sink.Add("Loss of data atoms, not told", data, SyndromeCycle.Layers, Weights.Cz(data) + random);
+        }
+
+        if (tells)
+        {
+            sink.Add("Loss of check atoms", check, SyndromeCycle.Layers, LossWeights.Told(check, 1));
+        }
+        else
+        {
             sink.Add("Loss of check atoms, not told", check, SyndromeCycle.Layers, Weights.Cz(check));
         }
     }
