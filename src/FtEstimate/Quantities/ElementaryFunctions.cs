@@ -26,8 +26,8 @@ public static class ElementaryFunctions
 
         if (Math.Abs(x) < 1e-3)
         {
-            // waiting errors ask for this case a million times; the next term is below 1e-14 of the first
-            return x * (1 + (x / 2 * (1 + (x / 3 * (1 + (x / 4))))));
+            // waiting errors ask for this case a million times; the next term is below 2e-18 of the first
+            return x * (1 + (x / 2 * (1 + (x / 3 * (1 + (x / 4 * (1 + (x / 5))))))));
         }
 
         double power = Math.Exp(x);
