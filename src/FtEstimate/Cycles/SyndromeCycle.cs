@@ -21,7 +21,7 @@ public sealed class SyndromeCycle
         Reading = reading;
         Rules = rules;
         _fixed = FixedTimes.Of(rules);
-        _growing = [.. Merged(rules.Where(rule => !rule.IsFixed))];
+        _growing = [.. Merged(rules)];
     }
 
     /// <summary>The readout scheme.</summary>
@@ -97,14 +97,35 @@ public sealed class SyndromeCycle
     }
 
     /// <summary>Phases of the same work, limit and effect on the data as one: four CZ layers cost one look at the load.</summary>
-    private static IEnumerable<PhaseRule> Merged(IEnumerable<PhaseRule> rules) => rules
-        .GroupBy(rule => (rule.Work, rule.AtOnce, rule.Data))
-        .Select(group => group.First() with
+    private static List<PhaseRule> Merged(ImmutableArray<PhaseRule> rules)
+    {
+        List<PhaseRule> merged = [];
+        foreach (PhaseRule rule in rules)
         {
-            SecondsWhole = group.Sum(rule => rule.PerRound * rule.SecondsWhole),
-            SecondsPerGo = group.Sum(rule => rule.PerRound * rule.SecondsPerGo),
-            PerRound = 1,
-        });
+            if (rule.IsFixed)
+            {
+                continue;
+            }
+
+            int same = merged.FindIndex(other => other.Work == rule.Work && other.AtOnce == rule.AtOnce && other.Data == rule.Data);
+            PhaseRule sum = same < 0 ? rule with { SecondsWhole = 0, SecondsPerGo = 0, PerRound = 1 } : merged[same];
+            sum = sum with
+            {
+                SecondsWhole = sum.SecondsWhole + (rule.PerRound * rule.SecondsWhole),
+                SecondsPerGo = sum.SecondsPerGo + (rule.PerRound * rule.SecondsPerGo),
+            };
+            if (same < 0)
+            {
+                merged.Add(sum);
+            }
+            else
+            {
+                merged[same] = sum;
+            }
+        }
+
+        return merged;
+    }
 
     /// <summary>Seconds by what the data atoms do.</summary>
     private struct FixedTimes

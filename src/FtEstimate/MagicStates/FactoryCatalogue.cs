@@ -20,13 +20,26 @@ public sealed record CatalogueEntry(Factory Factory, bool Dominated);
 /// </remarks>
 public sealed class FactoryCatalogue
 {
-    // An error this much below what is asked for buys nothing.
-    private const double ErrorThatBuysNothing = 1e-4;
+    // An error this much below what is asked for buys nothing: at most a hundredth of the failure that all states together may cause.
+    private const double ErrorThatBuysNothing = 1e-2;
 
-    private readonly ConcurrentDictionary<(NoiseKey Noise, int ErrorExponent), ImmutableArray<Factory>> _found = new();
+    // The error asked for is rounded up to a power of ten in steps of an eighth.
+    private const int ErrorStepsPerDecade = 8;
+
+    private readonly ConcurrentDictionary<Question, Found> _found = new();
 
     /// <summary>Number of designs in the grid.</summary>
     public static int DesignCount => CatalogueGrid.Entries.Length;
+
+    /// <summary>
+    /// Builds the grid and has the kernels compiled, which the first question would otherwise wait for: worth calling on another thread while
+    /// files are read. Changes nothing that can be seen.
+    /// </summary>
+    public static void WarmUp()
+    {
+        const double anyError = 1e-3;
+        _ = Factory.Of(CatalogueGrid.Entries[^1].Design, new FactoryNoise(_ => anyError, anyError));
+    }
 
     /// <summary>Every design of the grid, in order of rising atoms.</summary>
     public static ImmutableArray<CatalogueEntry> All(FactoryNoise noise)
@@ -46,7 +59,7 @@ public sealed class FactoryCatalogue
 
     /// <summary>
     /// The designs with an error at most as stated that no other such design beats in atoms, rounds per state and error at once, in order of
-    /// rising atoms. Errors below 1e-4 of the stated one count as equal. Empty when no design is good enough.
+    /// rising atoms. Errors below a hundredth of the stated one count as equal. Empty when no design is good enough.
     /// </summary>
     /// <remarks>
     /// Exact, though most designs are never evaluated: they are visited in order of atoms, and one is skipped when bounds on its error
@@ -84,24 +97,40 @@ public sealed class FactoryCatalogue
         return [.. front.Members];
     }
 
-    /// <summary>As <see cref="Undominated(FactoryNoise, double)"/>, remembered by a key of the noise and the error rounded up to a power of ten.</summary>
+    /// <summary>As <see cref="Undominated(FactoryNoise, double)"/>, remembered by a key of the noise and the error rounded up to an eighth of a decade.</summary>
     /// <param name="key">Key of the noise; see <see cref="NoiseGrid"/>.</param>
     /// <param name="noise">Gives the noise of that key; called only when it is new.</param>
     /// <param name="errorAtMost">
-    /// Largest useful output error, above 0. Since it is rounded up, the result may hold designs with up to ten times that error.
+    /// Largest useful output error, above 0. Since it is rounded up, the result may hold designs with up to a third more.
     /// </param>
     /// <exception cref="ArgumentOutOfRangeException">The error is not above 0.</exception>
     public ImmutableArray<Factory> Undominated(NoiseKey key, Func<FactoryNoise> noise, double errorAtMost)
     {
         ArgumentOutOfRangeException.ThrowIfNegativeOrZero(errorAtMost);
 
-        // 1e-12 must not become 1e-11 by rounding
-        int exponent = (int)Math.Ceiling(Math.Log10(errorAtMost) - 1e-9);
+        // 1e-12 must not become 1.3e-12 by rounding
+        int step = (int)Math.Ceiling((ErrorStepsPerDecade * Math.Log10(errorAtMost)) - 1e-9);
         return _found.GetOrAdd(
-            (key, exponent),
-            static (entry, noise) => Undominated(noise(), Math.Pow(10, entry.ErrorExponent)),
-            noise);
+            new Question(key, step),
+            static (question, noise) => new Found(Undominated(noise(), Math.Pow(10, (double)question.ErrorStep / ErrorStepsPerDecade))),
+            noise).Factories;
     }
+
+    /// <summary>What was asked. A class, as is the answer: a dictionary of classes needs no code of its own when the program starts.</summary>
+    private sealed class Question(NoiseKey noise, int errorStep) : IEquatable<Question>
+    {
+        private readonly NoiseKey _noise = noise;
+
+        public int ErrorStep { get; } = errorStep;
+
+        public bool Equals(Question? other) => other is not null && _noise.Equals(other._noise) && ErrorStep == other.ErrorStep;
+
+        public override bool Equals(object? obj) => Equals(obj as Question);
+
+        public override int GetHashCode() => HashCode.Combine(_noise.XBin, _noise.ZBin, _noise.InjectedBin, _noise.GateBin, ErrorStep);
+    }
+
+    private sealed record Found(ImmutableArray<Factory> Factories);
 
     /// <summary>The grid under one noise, each feeder block worked out once.</summary>
     private sealed class GridEvaluation(FactoryNoise noise)

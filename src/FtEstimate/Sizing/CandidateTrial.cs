@@ -42,6 +42,9 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
     private TStateDemand LeastDemand => _leastDemand ??= TStateDemand.For(
         _scenario.Workload, space.Synthesis, RotationErrorWithin(limits.FaultsAtMost));
 
+    /// <summary>T states that every machine needs at least.</summary>
+    public double LeastTStates => LeastDemand.TStates;
+
     /// <summary>The bounds of a layout at a distance.</summary>
     public TrialBase WithoutFactories(OperatingPoint point, LogicLayout layout, int distance)
     {
@@ -60,13 +63,13 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             tileAtoms,
             atoms,
             strength,
-            LeastTStates(patchFailure),
+            TStatesBeside(patchFailure),
             clock.RunSeconds,
             patchFailure);
     }
 
     /// <summary>T states when the rotations may use what the patches leave of the allowed failure.</summary>
-    private double LeastTStates(double patchFailure)
+    private double TStatesBeside(double patchFailure)
     {
         double left = limits.Each ? limits.FaultsAtMost : limits.FaultsAtMost - patchFailure;
         return left <= 0
@@ -74,10 +77,9 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             : TStateDemand.For(_scenario.Workload, space.Synthesis, RotationErrorWithin(left)).TStates;
     }
 
-    /// <summary>Shortest run at a given round time, with unlimited supply.</summary>
-    public double RunAtLoad(in TrialBase bare, double roundSeconds) => RunClock.Of(
-        bare.Layout, LeastDemand, bare.Distance, roundSeconds + ExtraWaiting(bare.Point, bare.Layout, bare.Distance),
-        bare.Point.ReactionSeconds(bare.Distance), 0).RunSeconds;
+    /// <summary>Shortest run at a given round time, patch moves included, with unlimited supply.</summary>
+    public double RunAtRound(in TrialBase bare, double roundSeconds) => RunClock.Of(
+        bare.Layout, LeastDemand, bare.Distance, roundSeconds, bare.Point.ReactionSeconds(bare.Distance), 0).RunSeconds;
 
     /// <summary>Round time with so many sites.</summary>
     public static double RoundAtLoad(in TrialBase bare, double sites) =>

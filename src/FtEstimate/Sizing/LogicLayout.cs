@@ -22,7 +22,7 @@ public sealed record LogicLayout(
     /// <summary>Rise of the noise strength per transversal gate and round (Zhou 2025, arXiv:2505.15907; from memory; it gives the published optimum of 3 gates per round at d = 5).</summary>
     public const double NoisePerTransversalGate = 1.0 / 6;
 
-    private static readonly double[] GatesPerRoundToTry = [0.5, 1, 2, 3, 4];
+    private static readonly double[] GatesPerRoundToTry = [0.5, 1, 2, 4];
 
     /// <summary>Factor on the noise strength.</summary>
     public double NoiseFactor => 1 + (NoisePerTransversalGate * GatesPerRound);

@@ -20,6 +20,9 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     /// <summary>At most this many factory counts are tried within one size step.</summary>
     private const int CountsPerSizeStep = 4;
 
+    /// <summary>Noise is rounded up by up to 2 % where factories are looked up: a lower bound must take that back.</summary>
+    private const double SafetyOfRounding = 0.8;
+
     private readonly CandidateTrial _trial = new(space, factories, limits);
     private readonly UnbeatenSet _unbeaten = new();
 
@@ -102,8 +105,8 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         }
 
         // the same for all layouts and distances, so that they share the catalogue's memory
-        double errorAtMost = limits.FaultsAtMost / bare.LeastTStates;
-        for (int step = SizeStepOf(bare.TileAtoms); ; step++)
+        double errorAtMost = limits.FaultsAtMost / _trial.LeastTStates;
+        for (int step = SizeStepOf(bare.TileAtoms + LeastFactoryAtoms(bare, leaner, errorAtMost)); ; step++)
         {
             double low = Math.Pow(SizeStep, step);
             double high = low * SizeStep;
@@ -116,9 +119,16 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 return slowest;
             }
 
-            double longestUsefulRun = _trial.RunAtLoad(bare, state.Times.RoundSeconds);
             double leastRoundSeconds = CandidateTrial.RoundAtLoad(bare, Math.Max(low, bare.TileAtoms));
-            double leanerRun = ShortestRun(bare, leaner, state.Times.RoundSeconds);
+            double leastAtoms = bare.Atoms + Math.Max(0, low - bare.TileAtoms);
+            if (_unbeaten.Beats(leastAtoms, _trial.RunAtRound(bare, leastRoundSeconds)))
+            {
+                // larger still is beaten too: more atoms, longer rounds
+                return slowest;
+            }
+
+            double longestUsefulRun = _trial.RunAtRound(bare, moving.Times.RoundSeconds);
+            double leanerRun = ShortestRun(bare, leaner, moving.Times.RoundSeconds);
             bool moreIsUseful = false;
             foreach (Factory factory in factories.At(bare.Point, state, bare.Distance, errorAtMost))
             {
@@ -171,12 +181,35 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     private bool Beaten(in TrialBase bare, Factory factory, double supplySecondsOfOne, double least, double most) =>
         _unbeaten.Beats(bare.Atoms + (factory.Atoms * least), Math.Max(bare.RunSeconds, supplySecondsOfOne / most));
 
+    /// <summary>
+    /// Factory atoms below which supply sets the pace and a leaner layout is as fast: atoms times rounds of the cheapest factory at the noise of
+    /// the bare layout, which larger machines only exceed.
+    /// </summary>
+    private double LeastFactoryAtoms(in TrialBase bare, ImmutableArray<LogicLayout> leaner, double errorAtMost)
+    {
+        if (leaner.IsEmpty || space.Scenario.Method.FactoryCount is not null)
+        {
+            return 0;
+        }
+
+        OperatingState state = bare.Point.At(MachineLoad.Of(bare.TileAtoms, bare.Distance));
+        double roundSeconds = CandidateTrial.RoundAtLoad(bare, bare.TileAtoms);
+        double cheapest = double.PositiveInfinity;
+        foreach (Factory factory in factories.At(bare.Point, state, bare.Distance, errorAtMost))
+        {
+            cheapest = Math.Min(cheapest, factory.Atoms * factory.RoundsPerOutput);
+        }
+
+        double atoms = cheapest * bare.LeastTStates * roundSeconds / ShortestRun(bare, leaner, roundSeconds);
+        return double.IsFinite(atoms) ? SafetyOfRounding * atoms : 0;
+    }
+
     private double ShortestRun(in TrialBase bare, ImmutableArray<LogicLayout> layouts, double roundSeconds)
     {
         double shortest = double.PositiveInfinity;
         foreach (LogicLayout layout in layouts)
         {
-            shortest = Math.Min(shortest, _trial.RunAtLoad(bare with { Layout = layout }, roundSeconds));
+            shortest = Math.Min(shortest, _trial.RunAtRound(bare with { Layout = layout }, roundSeconds));
         }
 
         return shortest;

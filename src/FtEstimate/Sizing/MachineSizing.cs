@@ -43,7 +43,12 @@ public sealed class MachineSizing(FactoryCatalogue catalogue)
 
         // at the exact noise of the factories run times shift by a little: enough to overtake a neighbour
         ImmutableArray<SizedMachine> unbeaten = [.. rows.Where(row => !rows.Any(other => Beats(other, row)))];
-        SizedMachine best = unbeaten.MinBy(machine => Measure(machine, prefer))!;
+        SizedMachine best = unbeaten[0];
+        foreach (SizedMachine machine in unbeaten)
+        {
+            best = Measure(machine, prefer) < Measure(best, prefer) ? machine : best;
+        }
+
         SizedMachine? otherStyle = perStyle
             .Select(found => Preferred(found, prefer))
             .Where(candidate => candidate.Layout.Style != best.Layout.Style)
@@ -73,7 +78,7 @@ public sealed class MachineSizing(FactoryCatalogue catalogue)
     }
 
     /// <summary>What a preference wants small.</summary>
-    internal static double Measure(in Candidate candidate, Preference preference) =>
+    internal static double Measure(Candidate candidate, Preference preference) =>
         Measure(candidate.Atoms, candidate.RunSeconds, preference);
 
     private static double Measure(SizedMachine machine, Preference preference) =>
@@ -94,7 +99,7 @@ internal static class TradeOff
     private const int Rows = 12;
 
     /// <summary>Spreads the rows evenly over the logarithm of the run time; ends and the preferred machine stay.</summary>
-    public static ImmutableArray<Candidate> Thin(IReadOnlyList<Candidate> unbeaten, in Candidate preferred)
+    public static ImmutableArray<Candidate> Thin(IReadOnlyList<Candidate> unbeaten, Candidate preferred)
     {
         if (unbeaten.Count <= Rows)
         {
@@ -109,7 +114,7 @@ internal static class TradeOff
         {
             double place = (longest - Math.Log(unbeaten[i].RunSeconds)) / (longest - shortest);
             int slot = (int)Math.Floor(place * (Rows - 1));
-            bool isPreferred = unbeaten[i] == preferred;
+            bool isPreferred = ReferenceEquals(unbeaten[i], preferred);
             if (slot > lastSlot || isPreferred || i == unbeaten.Count - 1)
             {
                 kept.Add(unbeaten[i]);

@@ -27,7 +27,7 @@ public sealed record SearchSpace(
     public const int LargestDistance = 99;
 
     /// <summary>Exposures that shorten the round by less are not tried: the resolution of the search in time.</summary>
-    public const double WorthwhileShortening = 0.01;
+    public const double WorthwhileShortening = 0.02;
 
     /// <summary>The space a scenario leaves open, with the readout in use.</summary>
     /// <param name="scenario">The question; names of law, patch and synthesis are known to exist.</param>
@@ -58,33 +58,39 @@ public sealed record SearchSpace(
 
         ChannelWeights weights = ChannelWeights.For(law.Threshold);
         MachineLoad onePatch = MachineLoad.Of(2, 3);
-        var tried = new List<(OperatingPoint Point, OperatingState State)>();
+        var tried = new List<TriedPoint>();
         foreach (double exposure in Exposures.ToTry(array.Readout))
         {
             var noise = new AtomNoise(array, SyndromeCycle.Of(array, array.Readout, exposure), weights);
             var point = new AtomOperatingPoint(noise, machine.Control);
-            tried.Add((point, point.At(onePatch)));
+            tried.Add(new TriedPoint(point, point.At(onePatch)));
         }
 
-        return [.. WorthTrying(tried).Select(kept => kept.Point)];
+        return WorthTrying(tried);
     }
 
     /// <summary>
     /// From the quietest point to shorter and shorter rounds: each kept point shortens the round of a single patch by at least
     /// <see cref="WorthwhileShortening"/>, and is the quietest that does. A longer round at more noise is beaten outright.
     /// </summary>
-    private static IEnumerable<(OperatingPoint Point, OperatingState State)> WorthTrying(
-        List<(OperatingPoint Point, OperatingState State)> tried)
+    private static ImmutableArray<OperatingPoint> WorthTrying(List<TriedPoint> tried)
     {
+        tried.Sort((a, b) => a.State.Strength.Mean.CompareTo(b.State.Strength.Mean));
+        var kept = ImmutableArray.CreateBuilder<OperatingPoint>();
         double shortest = double.PositiveInfinity;
-        foreach ((OperatingPoint Point, OperatingState State) candidate in tried.OrderBy(point => point.State.Strength.Mean))
+        foreach (TriedPoint candidate in tried)
         {
             double round = candidate.State.Times.RoundSeconds;
             if (round <= (1 - WorthwhileShortening) * shortest)
             {
                 shortest = round;
-                yield return candidate;
+                kept.Add(candidate.Point);
             }
         }
+
+        return kept.ToImmutable();
     }
+
+    /// <summary>An operating point with what it gives a single patch.</summary>
+    private sealed record TriedPoint(OperatingPoint Point, OperatingState State);
 }

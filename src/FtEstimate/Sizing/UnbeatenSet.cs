@@ -16,7 +16,7 @@ internal sealed class UnbeatenSet
     }
 
     /// <summary>Takes a candidate in unless it is beaten, and drops those it beats.</summary>
-    public void Offer(in Candidate candidate)
+    public void Offer(Candidate candidate)
     {
         if (Beats(candidate.Atoms, candidate.RunSeconds))
         {

@@ -34,9 +34,19 @@ internal sealed record PublishedCounts(int Distance, MemoryCount[] Rows)
     ]);
 
     /// <summary>The sum of both bases per round against noise strength.</summary>
-    public LogLogCurve ToCurve(double threshold) => new(
-        [.. Rows.Select(row => row.UniformError / threshold)],
-        [.. Rows.Select(row => PerRound(row.FailuresX / row.ShotsX) + PerRound(row.FailuresZ / row.ShotsZ))]);
+    public LogLogCurve ToCurve(double threshold)
+    {
+        double[] strengths = new double[Rows.Length];
+        double[] errors = new double[Rows.Length];
+        for (int i = 0; i < Rows.Length; i++)
+        {
+            MemoryCount row = Rows[i];
+            strengths[i] = row.UniformError / threshold;
+            errors[i] = PerRound(row.FailuresX / row.ShotsX) + PerRound(row.FailuresZ / row.ShotsZ);
+        }
+
+        return new LogLogCurve(strengths, errors);
+    }
 
     private double PerRound(double failure) => MemoryError.PerRound(failure, 3 * Distance);
 }
