@@ -29,8 +29,8 @@ internal static class ReportCommand
     private static int Run(
         string path, IReadOnlyList<string> settings, OutputPlaces places, TextWriter output, TextWriter error)
     {
-        // the second core compiles the factory sums while the first reads files
-        Task warmUp = Task.Run(FactoryCatalogue.WarmUp);
+        // a second core compiles the factory sums while this one reads files
+        _ = Task.Run(FactoryCatalogue.WarmUp);
         ScenarioReading reading = ScenarioReader.Read(path, settings);
         if (reading.Scenario is not { } scenario)
         {
@@ -38,7 +38,6 @@ internal static class ReportCommand
             return ExitStatus.WrongInput;
         }
 
-        warmUp.Wait();
         SizingResult result = new MachineSizing(new FactoryCatalogue()).Find(scenario);
         if (!ReportOutput.Write(EstimateReport.Of(result), () => JsonFigures.Of(result), places, output, error))
         {

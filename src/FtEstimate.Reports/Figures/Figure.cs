@@ -7,7 +7,7 @@ namespace FtEstimate.Reports.Figures;
 /// <param name="Value">The number in SI units; null when there is none, or the figure is words.</param>
 /// <param name="Words">The words of a figure without a number.</param>
 /// <param name="Note">Added to what people read, such as the limit it is held against.</param>
-public readonly record struct Figure(FigureKind Kind, double? Value, string? Words = null, string Note = "")
+public sealed record Figure(FigureKind Kind, double? Value, string? Words = null, string Note = "")
 {
     /// <summary>How a missing number reads.</summary>
     public const string Missing = "not stated";

@@ -38,7 +38,8 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     {
         ChannelList list = new();
         Visit(times, Loss(times), ref list);
-        return new ErrorLedger([.. list.Channels.OrderByDescending(channel => channel.Strength.Mean)]);
+        list.Channels.Sort((a, b) => b.Strength.Mean.CompareTo(a.Strength.Mean));
+        return new ErrorLedger([.. list.Channels]);
     }
 
     /// <summary>

@@ -1,4 +1,3 @@
-using System.Collections.Immutable;
 using FtEstimate.Cycles;
 using FtEstimate.Machines;
 
@@ -134,68 +133,4 @@ public sealed class AbstractOperatingPoint(AbstractApparatus apparatus, double t
 
     /// <inheritdoc/>
     public override double PatchMoveSeconds(int distance) => 0;
-}
-
-/// <summary>The exposures a sizing tries.</summary>
-public static class Exposures
-{
-    /// <summary>Points per decade of the exposure grid, which does not depend on the machine.</summary>
-    public const int PerDecade = 24;
-
-    private const double ShortestSeconds = 1e-7;
-
-    private const double LongestSeconds = 1;
-
-    /// <summary>
-    /// The stated exposure; or, when it is left to the sizing, the points of a fixed grid from a hundredth of the exposure with the fewest flips
-    /// up to that one: a longer look flips more and waits longer.
-    /// </summary>
-    public static ImmutableArray<double> ToTry(ReadoutScheme scheme)
-    {
-        if (scheme.Detector is not PhotonCounting counting)
-        {
-            return [((StatedReadout)scheme.Detector).StatedExposureSeconds];
-        }
-
-        if (counting.ExposureSeconds is { } stated)
-        {
-            return [stated];
-        }
-
-        int last = FewestFlips(counting, scheme.AtomsPerCheck);
-        int first = Math.Max(0, last - (2 * PerDecade));
-        var seconds = ImmutableArray.CreateBuilder<double>(last - first + 1);
-        for (int i = first; i <= last; i++)
-        {
-            seconds.Add(Grid(i));
-        }
-
-        return seconds.ToImmutable();
-    }
-
-    private static double Grid(int index) => ShortestSeconds * Math.Pow(10, (double)index / PerDecade);
-
-    /// <summary>Grid point with the fewest flips; beyond it depumping and background win, or nothing is left to gain.</summary>
-    private static int FewestFlips(PhotonCounting counting, int atoms)
-    {
-        const double nothingToGain = 1e-8;
-        int best = 0;
-        double fewest = 1;
-        for (int i = 0; Grid(i) <= LongestSeconds; i++)
-        {
-            double flip = PhotonStatistics.Read(counting, atoms, Grid(i)).Flip;
-            if (flip < fewest)
-            {
-                (best, fewest) = (i, flip);
-            }
-
-            bool pastBest = i > best + PerDecade && fewest < 0.4;
-            if (fewest < nothingToGain || pastBest)
-            {
-                break;
-            }
-        }
-
-        return best;
-    }
 }

@@ -12,14 +12,9 @@ internal sealed record LeanerLayouts(LogicLayout Layout, ImmutableArray<LogicLay
     /// <summary>The layouts of a style, each after all that are leaner.</summary>
     public static ImmutableArray<LeanerLayouts> Of(ImmutableArray<LogicLayout> layouts, LogicStyle style)
     {
-        LogicLayout[] ofStyle =
-        [
-            .. layouts
-                .Where(layout => layout.Style == style)
-                .OrderBy(layout => layout.Tiles)
-                .ThenBy(layout => layout.GatesPerRound),
-        ];
-        var result = ImmutableArray.CreateBuilder<LeanerLayouts>(ofStyle.Length);
+        List<LogicLayout> ofStyle = [.. layouts.Where(layout => layout.Style == style)];
+        ofStyle.Sort((a, b) => a.Tiles != b.Tiles ? a.Tiles.CompareTo(b.Tiles) : a.GatesPerRound.CompareTo(b.GatesPerRound));
+        var result = ImmutableArray.CreateBuilder<LeanerLayouts>(ofStyle.Count);
         foreach (LogicLayout layout in ofStyle)
         {
             // of two that are equal in both respects the earlier one counts as leaner

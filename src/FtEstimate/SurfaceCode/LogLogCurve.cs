@@ -11,9 +11,13 @@ internal sealed class LogLogCurve
     /// <summary>A curve through at least two points with growing x; all values above 0.</summary>
     public LogLogCurve(double[] x, double[] y)
     {
-        logX = [.. x.Select(value => Math.Log(value))];
-        logY = [.. y.Select(value => Math.Log(value))];
-        slopes = [.. Enumerable.Range(0, x.Length - 1).Select(i => (logY[i + 1] - logY[i]) / (logX[i + 1] - logX[i]))];
+        logX = Array.ConvertAll(x, Math.Log);
+        logY = Array.ConvertAll(y, Math.Log);
+        slopes = new double[x.Length - 1];
+        for (int i = 0; i < slopes.Length; i++)
+        {
+            slopes[i] = (logY[i + 1] - logY[i]) / (logX[i + 1] - logX[i]);
+        }
     }
 
     /// <summary>ln y at ln x.</summary>
