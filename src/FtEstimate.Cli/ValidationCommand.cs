@@ -43,6 +43,7 @@ internal static class ValidationCommand
             comparison.Figure.Figure,
             comparison.Ours,
             comparison.Figure.Published,
+            comparison.Figure.AsPrinted,
             comparison.Figure.Source,
             comparison.Figure.Remark)),
     ];

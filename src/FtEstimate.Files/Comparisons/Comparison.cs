@@ -8,10 +8,11 @@ namespace FtEstimate.Files.Comparisons;
 /// <param name="Subject">What is computed, in the notation of the kind.</param>
 /// <param name="Figure">Which figure of it.</param>
 /// <param name="Published">The published value, in SI units.</param>
+/// <param name="AsPrinted">The published value with the digits it has in print.</param>
 /// <param name="Source">First author, year, arXiv number.</param>
 /// <param name="Remark">Why the two may differ; empty: no remark.</param>
 public sealed record PublishedFigure(
-    string Topic, string Kind, string Subject, string Figure, double Published, string Source, string Remark);
+    string Topic, string Kind, string Subject, string Figure, double Published, string AsPrinted, string Source, string Remark);
 
 /// <summary>Our figure beside the published one.</summary>
 /// <param name="Figure">The published figure.</param>

@@ -44,7 +44,7 @@ public static class ComparisonTable
                 continue;
             }
 
-            PublishedFigure figure = new(cells[0], cells[1], cells[2], cells[3], published, cells[5], cells[6]);
+            PublishedFigure figure = new(cells[0], cells[1], cells[2], cells[3], published, cells[4], cells[5], cells[6]);
             if (ours.Of(figure) is { } value && double.IsFinite(value))
             {
                 comparisons.Add(new Comparison(figure, value));

@@ -1,5 +1,4 @@
 using System.Collections.Immutable;
-using FtEstimate.Quantities;
 using FtEstimate.Reports.Documents;
 
 namespace FtEstimate.Reports.Listings;
@@ -10,15 +9,16 @@ namespace FtEstimate.Reports.Listings;
 /// <param name="Figure">Which figure of it.</param>
 /// <param name="Ours">Our value, in SI units.</param>
 /// <param name="Published">The published value.</param>
+/// <param name="AsPrinted">The published value with the digits it has in print.</param>
 /// <param name="Source">First author, year, arXiv number.</param>
 /// <param name="Remark">Why the two may differ; empty: no remark.</param>
 public sealed record ValidationRow(
-    string Topic, string Subject, string Figure, double Ours, double Published, string Source, string Remark);
+    string Topic, string Subject, string Figure, double Ours, double Published, string AsPrinted, string Source, string Remark);
 
 /// <summary>Our numbers beside the published ones, topic by topic.</summary>
 public static class ValidationReport
 {
-    private const int Digits = 5;
+    private const string Digits = "G5";
 
     /// <summary>The page.</summary>
     /// <param name="rows">The rows, those of a topic one after another.</param>
@@ -29,7 +29,7 @@ public static class ValidationReport
             "How to read this page",
             [
                 new Paragraph(
-                    "Each row is computed by the tool and held against a published number. The page is made by the command `validation`; " +
+                    "Each row is computed by the tool and held against a published number. The page is made by the command “validation”; " +
                     "a test fails when it is out of date. Units are SI. A deviation is ours relative to the published number."),
                 new Paragraph("Remarks say why the two differ where they do. Nothing is tuned to make a row agree."),
             ]));
@@ -64,8 +64,8 @@ public static class ValidationReport
             table.Add(
                 row.Subject,
                 row.Figure,
-                Show.Significant(row.Ours, Digits),
-                Show.Significant(row.Published, Digits),
+                row.Ours.ToString(Digits, System.Globalization.CultureInfo.InvariantCulture),
+                row.AsPrinted,
                 Deviation(row),
                 row.Source,
                 row.Remark);
