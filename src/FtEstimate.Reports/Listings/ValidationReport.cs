@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Globalization;
 using FtEstimate.Reports.Documents;
 
 namespace FtEstimate.Reports.Listings;
@@ -64,7 +65,7 @@ public static class ValidationReport
             table.Add(
                 row.Subject,
                 row.Figure,
-                row.Ours.ToString(Digits, System.Globalization.CultureInfo.InvariantCulture),
+                Ours(row.Ours),
                 row.AsPrinted,
                 Deviation(row),
                 row.Source,
@@ -74,9 +75,15 @@ public static class ValidationReport
         return table.Build();
     }
 
+    private static string Ours(double value) => value
+        .ToString(Digits, CultureInfo.InvariantCulture)
+        .Replace("E+0", "e", StringComparison.Ordinal)
+        .Replace("E-0", "e-", StringComparison.Ordinal)
+        .Replace('E', 'e');
+
     private static string Deviation(ValidationRow row)
     {
         double relative = (row.Ours - row.Published) / row.Published;
-        return relative.ToString("+0.0 %;−0.0 %;0.0 %", System.Globalization.CultureInfo.InvariantCulture);
+        return relative.ToString("+0.0 %;−0.0 %;0.0 %", CultureInfo.InvariantCulture);
     }
 }
