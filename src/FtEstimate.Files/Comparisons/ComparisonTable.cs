@@ -13,7 +13,8 @@ public static class ComparisonTable
 
     /// <summary>Reads the table in a folder and computes our side.</summary>
     /// <param name="folder">The folder with the table and its scenarios.</param>
-        public static ComparisonReading Read(string folder)
+    /// <returns>Our figures beside the published ones, and what is wrong with the table.</returns>
+    public static ComparisonReading Read(string folder)
     {
         string path = Path.Combine(folder, FileName);
         InputText content = InputText.Read(path);
