@@ -35,7 +35,7 @@ public static class FactoriesReport
                     "Magic-state factories",
                     [
                         new Paragraph(
-                            $"{Words.Count(entries.Length, "factory", "factories")}, of which {Words.Whole(unbeaten)} are beaten by no other in atoms, rounds per state and error at once. " +
+                            $"{Words.Count(entries.Length, "factory", "factories")}, {Words.Whole(unbeaten)} unbeaten: no other is at least as good in atoms, rounds per state and error at once. " +
                             $"The noise is at {Show.Significant(question.Strength.Mean, 3)} of the threshold by the law {question.LawName}, and an injected state errs " +
                             $"with probability {Show.Probability(question.InjectedError)}."),
                         CatalogueTable(entries),
