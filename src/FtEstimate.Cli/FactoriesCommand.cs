@@ -36,6 +36,11 @@ internal static class FactoriesCommand
                 result.AddError("Give either a scenario file or --uniform P.");
             }
 
+            if (result.GetResult(options.Set) is not null && result.GetResult(uniform) is not null)
+            {
+                result.AddError("--set replaces inputs of a scenario; with --uniform there are none.");
+            }
+
             if (result.GetResult(all) is { Implicit: false } && result.GetResult(design) is not null)
             {
                 result.AddError("Give either --all or --design.");

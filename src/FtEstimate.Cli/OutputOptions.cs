@@ -40,12 +40,6 @@ internal sealed class OutputOptions
     public OutputPlaces Places(ParseResult parsed) => new(parsed.GetValue(Out), parsed.GetValue(Html), parsed.GetValue(Json));
 }
 
-/// <summary>Where a report goes.</summary>
-/// <param name="Markdown">File of the Markdown; null: standard output.</param>
-/// <param name="Page">File of the page; null: none.</param>
-/// <param name="Figures">File of the figures; null: none.</param>
-internal sealed record OutputPlaces(string? Markdown, string? Page, string? Figures);
-
 /// <summary>Numbers on the command line, always with a decimal point.</summary>
 internal static class CommandLineNumbers
 {

@@ -32,9 +32,8 @@ internal static class ReportCommand
         // a second core compiles the factory sums while this one reads files
         _ = Task.Run(FactoryCatalogue.WarmUp);
         ScenarioReading reading = ScenarioReader.Read(path, settings);
-        if (reading.Scenario is not { } scenario)
+        if (FaultOutput.Stop([.. reading.Faults, .. places.Faults(reading.Files)], error) || reading.Scenario is not { } scenario)
         {
-            FaultOutput.Write(reading.Faults, error);
             return ExitStatus.WrongInput;
         }
 

@@ -82,10 +82,17 @@ internal static class FaultOutput
         {
             error.WriteLine(fault.ToString());
         }
+    }
 
+    /// <summary>Prints faults found before anything was computed, and whether there are any.</summary>
+    public static bool Stop(IReadOnlyCollection<Fault> faults, TextWriter error)
+    {
+        Write(faults, error);
         if (faults.Count > 1)
         {
-            error.WriteLine(FormattableString.Invariant($"{faults.Count} faults; nothing was computed from them."));
+            error.WriteLine(FormattableString.Invariant($"{faults.Count} faults; nothing was computed."));
         }
+
+        return faults.Count > 0;
     }
 }

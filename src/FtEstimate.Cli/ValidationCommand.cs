@@ -17,17 +17,18 @@ internal static class ValidationCommand
         command.SetAction(parsed =>
         {
             TextWriter error = parsed.InvocationConfiguration.Error;
-            ComparisonReading reading = ComparisonTable.Read(parsed.GetRequiredValue(folder));
-            if (!reading.Faults.IsEmpty)
+            string where = parsed.GetRequiredValue(folder);
+            OutputPlaces places = new(parsed.GetValue(file), null, null);
+            ComparisonReading reading = ComparisonTable.Read(where);
+            if (FaultOutput.Stop([.. reading.Faults, .. places.Faults([Path.Combine(where, ComparisonTable.FileName)])], error))
             {
-                FaultOutput.Write(reading.Faults, error);
                 return ExitStatus.WrongInput;
             }
 
             bool written = ReportOutput.Write(
                 ValidationReport.Of(Rows(reading.Comparisons)),
                 () => "{}",
-                new OutputPlaces(parsed.GetValue(file), null, null),
+                places,
                 parsed.InvocationConfiguration.Output,
                 error);
             return written ? ExitStatus.Answer : ExitStatus.WrongInput;

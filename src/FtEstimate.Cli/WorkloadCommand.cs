@@ -19,15 +19,15 @@ internal static class WorkloadCommand
         {
             TextWriter output = parsed.InvocationConfiguration.Output;
             TextWriter error = parsed.InvocationConfiguration.Error;
-            WorkloadReading reading = ScenarioReader.ReadWorkload(parsed.GetRequiredValue(file), options.Settings(parsed));
-            if (reading.Workload is not { } workload)
+            string path = parsed.GetRequiredValue(file);
+            OutputPlaces places = options.Places(parsed);
+            WorkloadReading reading = ScenarioReader.ReadWorkload(path, options.Settings(parsed));
+            if (FaultOutput.Stop([.. reading.Faults, .. places.Faults([path])], error) || reading.Workload is not { } workload)
             {
-                FaultOutput.Write(reading.Faults, error);
                 return ExitStatus.WrongInput;
             }
 
-            bool written = ReportOutput.Write(
-                WorkloadReport.Of(workload), () => JsonFigures.Of(workload), options.Places(parsed), output, error);
+            bool written = ReportOutput.Write(WorkloadReport.Of(workload), () => JsonFigures.Of(workload), places, output, error);
             return written ? ExitStatus.Answer : ExitStatus.WrongInput;
         });
         return command;

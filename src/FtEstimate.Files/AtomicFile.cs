@@ -47,6 +47,25 @@ public static class AtomicFile
         }
     }
 
+    /// <summary>Why a file cannot be written where it is asked for, as far as that shows before writing; null: nothing speaks against it.</summary>
+    /// <param name="path">The file.</param>
+    public static Fault? FaultOfPlace(string path)
+    {
+        string? why = !IsFileName(path) ? "not a file name"
+            : IsDevice(path) ? null
+            : Directory.Exists(path) ? "it is a folder"
+            : !Directory.Exists(Path.GetDirectoryName(Path.GetFullPath(path))) ? "its folder does not exist"
+            : null;
+        return why is null ? null : new Fault(path, 0, 0, "", $"cannot be written: {why}");
+    }
+
+    /// <summary>Whether a text can name a file at all.</summary>
+    public static bool IsFileName(string path) => !string.IsNullOrWhiteSpace(path) && !path.Contains('\0', StringComparison.Ordinal);
+
+    /// <summary>Whether a path names a device: renaming over /dev/stdout or /dev/null would replace it.</summary>
+    public static bool IsDevice(string path) =>
+        !OperatingSystem.IsWindows() && (path.StartsWith("/dev/", StringComparison.Ordinal) || path.StartsWith("/proc/", StringComparison.Ordinal));
+
     /// <summary>Makes a folder unless it exists.</summary>
     /// <param name="path">The folder.</param>
     /// <returns>Null, or why it could not be made.</returns>
@@ -70,10 +89,6 @@ public static class AtomicFile
         ArgumentException or NotSupportedException => "not a file name",
         _ => problem.Message,
     };
-
-    // renaming over /dev/stdout or /dev/null would replace the device
-    private static bool IsDevice(string path) =>
-        !OperatingSystem.IsWindows() && (path.StartsWith("/dev/", StringComparison.Ordinal) || path.StartsWith("/proc/", StringComparison.Ordinal));
 
     private static void KeepPermissions(string target, string beside)
     {
