@@ -30,11 +30,13 @@ public static class App
             parseError.ShowHelp = false;
         }
 
-        InvocationConfiguration io = new() { Output = output, Error = error, EnableDefaultExceptionHandler = false };
+        // what is said about a wrong command line is no report
+        bool isWrong = parsed.Action is ParseErrorAction;
+        InvocationConfiguration io = new() { Output = isWrong ? error : output, Error = error, EnableDefaultExceptionHandler = false };
         try
         {
             int status = await parsed.InvokeAsync(io).ConfigureAwait(false);
-            return parsed.Action is ParseErrorAction ? ExitStatus.WrongInput : status;
+            return isWrong ? ExitStatus.WrongInput : status;
         }
         catch (OperationCanceledException)
         {

@@ -60,16 +60,15 @@ internal static class FactoriesCommand
         FactoriesRequest request, IReadOnlyList<string> settings, OutputPlaces places, TextWriter output, TextWriter error)
     {
         FactoryDesign? design = null;
+        List<Fault> faults = [];
         if (request.Design is { } text && !FactoryDesign.TryParse(text, out design, out string? fault))
         {
-            FaultOutput.Write([new Fault("--design", 0, 0, "", fault)], error);
-            return ExitStatus.WrongInput;
+            faults.Add(new Fault("--design", 0, 0, "", fault));
         }
 
         ScenarioReading? reading = request.Scenario is { } path ? ScenarioReader.Read(path, settings) : null;
-        if (reading is { Scenario: null })
+        if (FaultOutput.Stop([.. reading?.Faults ?? [], .. faults, .. places.Faults(reading?.Files ?? [])], error))
         {
-            FaultOutput.Write(reading.Faults, error);
             return ExitStatus.WrongInput;
         }
 
