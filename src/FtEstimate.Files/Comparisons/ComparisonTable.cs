@@ -37,10 +37,11 @@ public static class ComparisonTable
             List<string> cells = SplitQuoted(lines[i]);
             bool whole = cells.Count == Columns;
             double published = double.NaN;
-            if (!whole || !double.TryParse(cells[4], NumberStyles.Float, CultureInfo.InvariantCulture, out published))
+            if (!whole || !double.TryParse(cells[4], NumberStyles.Float, CultureInfo.InvariantCulture, out published)
+                || !(published > 0 && double.IsFinite(published)))
             {
                 faults.Add(new Fault(path, i + 1, 1, "", whole
-                    ? $"'{cells[4]}' is not a number"
+                    ? $"'{cells[4]}' is not a number above zero"
                     : $"expected {Columns} columns, found {cells.Count}"));
                 continue;
             }

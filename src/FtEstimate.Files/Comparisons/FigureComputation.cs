@@ -23,13 +23,15 @@ internal sealed class FigureComputation(string folder)
         string[] parts = figure.Subject.Split(" @ ");
         return figure.Kind switch
         {
-            "scenario" => OfScenario(parts[0], figure.Figure),
-            "factory" => OfFactory(parts, figure.Figure),
-            "distance" => OfDistance(parts),
-            "law" => OfLaw(parts),
-            "factoring" => OfWorkload(new Factoring((int)Number(parts[0])).Workload(), figure.Figure),
-            "rotation" => RotationSynthesis.Named(parts[0])?.TPerRotation(Number(parts[1])),
-            "move" => OfMove(parts),
+            "scenario" => OfScenario(figure.Subject, figure.Figure),
+            "factory" when Numbers(parts[1..]) is [var error] => OfFactory(parts[0], error, figure.Figure),
+            "distance" when Numbers(parts[1..]) is [var error, var target] && ScalingLaws.Named(parts[0]) is { } law =>
+                RequiredDistance.For(law, PatchError.Uniform(law, error), target),
+            "law" when Numbers(parts[1..]) is [var error, >= 3 and var distance] && ScalingLaws.Named(parts[0]) is { } law =>
+                PatchError.PerRound(law, PatchError.Uniform(law, error), (int)distance),
+            "factoring" when Numbers(parts) is [>= 2 and var bits] => OfWorkload(new Factoring((int)bits).Workload(), figure.Figure),
+            "rotation" when Numbers(parts[1..]) is [var error] => RotationSynthesis.Named(parts[0])?.TPerRotation(error),
+            "move" when Numbers(parts[1..]) is [var acceleration, var micrometres] => OfMove(parts[0], acceleration, micrometres * 1e-6),
             _ => null,
         };
     }
@@ -60,14 +62,13 @@ internal sealed class FigureComputation(string folder)
         return PatchError.SuppressionFactor(ScalingLaws.PublishedFit, onePatch, 3);
     }
 
-    private static double? OfFactory(string[] parts, string figure)
+    private static double? OfFactory(string name, double error, string figure)
     {
-        if (!FactoryDesign.TryParse(parts[0], out FactoryDesign? design, out _))
+        if (!FactoryDesign.TryParse(name, out FactoryDesign? design, out _))
         {
             return null;
         }
 
-        double error = Number(parts[1]);
         FactoryNoise noise = new(d => PatchError.PerRound(ScalingLaws.Textbook, PatchError.Uniform(ScalingLaws.Textbook, error), d), error);
         Factory factory = Factory.Of(design, noise);
         return figure switch
@@ -79,14 +80,6 @@ internal sealed class FigureComputation(string folder)
         };
     }
 
-    private static double? OfDistance(string[] parts) => ScalingLaws.Named(parts[0]) is { } law
-        ? RequiredDistance.For(law, PatchError.Uniform(law, Number(parts[1])), Number(parts[2]))
-        : null;
-
-    private static double? OfLaw(string[] parts) => ScalingLaws.Named(parts[0]) is { } law
-        ? PatchError.PerRound(law, PatchError.Uniform(law, Number(parts[1])), (int)Number(parts[2]))
-        : null;
-
     private static double? OfWorkload(Workload workload, string figure) => figure switch
     {
         "logical_qubits" => workload.LogicalQubits,
@@ -95,17 +88,31 @@ internal sealed class FigureComputation(string folder)
         _ => null,
     };
 
-    private static double? OfMove(string[] parts)
+    private static double? OfMove(string profile, double acceleration, double metres)
     {
-        MoveProfile? profile = parts[0] switch
+        MoveProfile? known = profile switch
         {
             "cubic" => MoveProfile.Cubic,
             "bang-bang" => MoveProfile.BangBang,
             "adiabatic-sine" => MoveProfile.AdiabaticSine,
             _ => null,
         };
-        return profile is { } known ? MoveTime.Seconds(known, Number(parts[2]) * 1e-6, Number(parts[1])) : null;
+        return known is { } shape ? MoveTime.Seconds(shape, metres, acceleration) : null;
     }
 
-    private static double Number(string text) => double.Parse(text, NumberStyles.Float, CultureInfo.InvariantCulture);
+    /// <summary>The parts as numbers; null unless all are numbers above zero.</summary>
+    private static double[]? Numbers(string[] parts)
+    {
+        double[] numbers = new double[parts.Length];
+        for (int i = 0; i < parts.Length; i++)
+        {
+            if (!double.TryParse(parts[i], NumberStyles.Float, CultureInfo.InvariantCulture, out numbers[i])
+                || !(numbers[i] > 0 && double.IsFinite(numbers[i])))
+            {
+                return null;
+            }
+        }
+
+        return numbers;
+    }
 }
