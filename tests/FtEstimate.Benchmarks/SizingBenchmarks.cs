@@ -13,6 +13,7 @@ namespace FtEstimate.Benchmarks;
 public class SizingBenchmarks
 {
     private readonly MachineSizing _warm = new(new FactoryCatalogue());
+    private readonly NoiseStrength _strength = new(0.25, 0.24);
     private Scenario _surgery = null!;
     private Scenario _bothStyles = null!;
 
@@ -28,7 +29,7 @@ public class SizingBenchmarks
 
     /// <summary>The yardstick.</summary>
     [Benchmark(Baseline = true)]
-    public double OneLawEvaluation() => PatchError.PerRound(ScalingLaws.PublishedFit, new NoiseStrength(0.25, 0.24), 29);
+    public double OneLawEvaluation() => PatchError.PerRound(ScalingLaws.PublishedFit, _strength, 29);
 
     /// <summary>All blocks of lattice surgery, factories remembered.</summary>
     [Benchmark]
