@@ -105,7 +105,7 @@ internal static class BottomLineSection
             $"one every {Show.Duration(machine.Clock.SupplySeconds / machine.Demand.TStates)}. More factories cost atoms.",
         Pace.Consumption when machine.Demand.TStates > 0 =>
             "Magic states, which the costly T gates use up, are taken in one after another: one every " +
-            $"{Show.Duration(machine.Clock.ConsumptionSeconds / machine.Demand.TStates)}. A faster round or a larger floor plan would help.",
+            $"{Show.Duration(machine.Clock.ConsumptionSeconds / machine.Demand.TStates)}. A faster round {(machine.Layout.Name == "fast" ? "" : "or a larger floor plan ")}would help.",
         Pace.Consumption => $"The logical gates themselves, layer by layer, at {Show.Duration(machine.Clock.StepSeconds)} each.",
         _ =>
             $"{Show.Significant(machine.Demand.ReactionDepth, 3)} decisions wait for one another, {Show.Duration(machine.ReactionSeconds)} each: " +

@@ -27,8 +27,12 @@ internal static class InputText
         (null, { } high) => $"to {Number(high)}",
     };
 
-    /// <summary>Where the value comes from.</summary>
-    public static string Source(Input input) => string.IsNullOrWhiteSpace(input.Source) ? "assumed" : input.Source;
+    /// <summary>Where the value comes from; goals, conventions and words are choices, a number without a source is assumed.</summary>
+    public static string Source(Input input) =>
+        !string.IsNullOrWhiteSpace(input.Source) ? input.Source
+        : input.Number is null || input.Path.StartsWith("goal.", StringComparison.Ordinal) || input.Path.StartsWith("method.", StringComparison.Ordinal)
+            ? "choice"
+            : "assumed";
 
     /// <summary>A number as a person would write it, up to ten digits.</summary>
     public static string Number(double number)

@@ -68,7 +68,7 @@ internal static class MethodSection
         if (subject.Cycle.IsPhysical)
         {
             bullets.Add(new Bullet(
-                "Weights of errors", "First order, from this project's own simulation of patches of distance 5 and 7; within 9 % in Λ on eight mixes of noise."));
+                "Weights of errors", "First order and interim: from an unpublished simulation of patches of distance 5 and 7, within 9 % in Λ on eight mixes of noise."));
             bullets.Add(new Bullet("Loss", "Weights of told losses after Baranes 2026 (arXiv:2502.20558), first order. A loss nobody tells counts as a gate error."));
         }
 

@@ -12,4 +12,7 @@ public readonly record struct MachineLoad(double DataAtoms, double CheckSites, d
     /// </summary>
     public static MachineLoad Of(double sites, int distance) =>
         new(sites / 2, sites / 2, sites / 2 * (distance - 1) / distance);
+
+    /// <summary>The load of so many sites at whatever distance: a pair for every data atom, which no distance exceeds.</summary>
+    public static MachineLoad AtMost(double sites) => new(sites / 2, sites / 2, sites / 2);
 }

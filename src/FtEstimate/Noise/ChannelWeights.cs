@@ -2,7 +2,7 @@ namespace FtEstimate.Noise;
 
 /// <summary>
 /// How strongly each kind of error counts towards the noise strength x, per unit probability, first order.
-/// Interim values from a Monte Carlo of distances 5 and 7 (within 9 % in Λ on eight noise mixes; the project's own estimate, not published),
+/// Interim values from a Monte Carlo of distances 5 and 7 that is not part of this repository (within 9 % in Λ on eight noise mixes; not published),
 /// for a law whose threshold is <see cref="ReferenceThreshold"/>; they scale with the threshold of the law in use.
 /// </summary>
 /// <param name="Scale">Reference threshold over the threshold of the law in use.</param>

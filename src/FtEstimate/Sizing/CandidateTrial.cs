@@ -152,7 +152,8 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
     public static OperatingState StateAt(OperatingPoint point, LogicLayout layout, int distance, double sites) =>
         point.StateOf(TimesAt(point, layout, distance, sites));
 
-    private static CycleTimes TimesAt(OperatingPoint point, LogicLayout layout, int distance, double sites) =>
+    /// <summary>Durations of a layout with a number of sites, patch moves included.</summary>
+    public static CycleTimes TimesAt(OperatingPoint point, LogicLayout layout, int distance, double sites) =>
         point.Times(MachineLoad.Of(sites, distance), ExtraWaiting(point, layout, distance));
 
     private static double ExtraWaiting(OperatingPoint point, LogicLayout layout, int distance) =>

@@ -20,11 +20,14 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
     /// <summary>At most this many factory counts are tried within one size step.</summary>
     private const int CountsPerSizeStep = 4;
 
-    /// <summary>Noise is rounded up by up to 2 % where factories are looked up: a lower bound must take that back.</summary>
-    private const double SafetyOfRounding = 0.8;
+    /// <summary>Noise is that of the upper end of a size step and rounded up where factories are looked up: a lower bound must take that back.</summary>
+    private const double SafetyOfRounding = 0.7;
 
     private readonly CandidateTrial _trial = new(space, factories, limits);
     private readonly UnbeatenSet _unbeaten = new();
+
+    /// <summary>Factories by size step, for the operating point being searched.</summary>
+    private readonly Dictionary<int, FactoryOffer> _offers = [];
 
     /// <summary>Unbeaten machines of one style, fewest atoms first; empty when none meets the goal.</summary>
     public IReadOnlyList<Candidate> Run()
@@ -32,6 +35,7 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         ImmutableArray<LeanerLayouts> layouts = LeanerLayouts.Of(space.Layouts, style);
         foreach (OperatingPoint point in space.Points)
         {
+            _offers.Clear();
             foreach (LeanerLayouts layout in layouts)
             {
                 SearchDistances(point, layout);
@@ -110,11 +114,9 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
         {
             double low = Math.Pow(SizeStep, step);
             double high = low * SizeStep;
-            OperatingState state = bare.Point.At(MachineLoad.Of(high, bare.Distance));
-            OperatingState moving = CandidateTrial.StateAt(bare.Point, bare.Layout, bare.Distance, high);
-            bool tooMuch = state.Strength.Worse >= 1
-                || AtomSupply.DemandPerSecond(low, bare.Point, moving) > limits.SupplyPerSecond;
-            if (tooMuch)
+            CycleTimes longest = CandidateTrial.TimesAt(bare.Point, bare.Layout, bare.Distance, high);
+            FactoryOffer offer = OfferAt(bare, step, errorAtMost);
+            if (offer.IsAboveThreshold || NeedsMoreAtomsThanDelivered(bare, low, longest))
             {
                 return slowest;
             }
@@ -127,15 +129,15 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
                 return slowest;
             }
 
-            double longestUsefulRun = _trial.RunAtRound(bare, moving.Times.RoundSeconds);
-            double leanerRun = ShortestRun(bare, leaner, moving.Times.RoundSeconds);
+            double longestUsefulRun = _trial.RunAtRound(bare, longest.RoundSeconds);
+            double leanerRun = ShortestRun(bare, leaner, longest.RoundSeconds);
             bool moreIsUseful = false;
-            foreach (Factory factory in factories.At(bare.Point, state, bare.Distance, errorAtMost))
+            foreach (Factory factory in offer.Factories)
             {
                 double supplyRounds = bare.LeastTStates * factory.RoundsPerOutput;
                 double supplySeconds = supplyRounds * leastRoundSeconds;
                 double useful = space.Scenario.Method.FactoryCount
-                    ?? Math.Ceiling(supplyRounds * moving.Times.RoundSeconds / longestUsefulRun);
+                    ?? Math.Ceiling(supplyRounds * longest.RoundSeconds / longestUsefulRun);
                 double most = Math.Floor((high - bare.TileAtoms) / factory.Atoms);
                 double least = Math.Max(1, Math.Floor((low - bare.TileAtoms) / factory.Atoms) + 1);
                 moreIsUseful |= useful > most;
@@ -192,10 +194,9 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
             return 0;
         }
 
-        OperatingState state = bare.Point.At(MachineLoad.Of(bare.TileAtoms, bare.Distance));
         double roundSeconds = CandidateTrial.RoundAtLoad(bare, bare.TileAtoms);
         double cheapest = double.PositiveInfinity;
-        foreach (Factory factory in factories.At(bare.Point, state, bare.Distance, errorAtMost))
+        foreach (Factory factory in OfferAt(bare, SizeStepOf(bare.TileAtoms), errorAtMost).Factories)
         {
             cheapest = Math.Min(cheapest, factory.Atoms * factory.RoundsPerOutput);
         }
@@ -214,6 +215,29 @@ internal sealed class MachineSearch(SearchSpace space, FactoryChoice factories, 
 
         return shortest;
     }
+
+    /// <summary>The factories at the noise of the upper end of a size step; tile factories follow the distance as well.</summary>
+    private FactoryOffer OfferAt(in TrialBase bare, int step, double errorAtMost)
+    {
+        int key = factories.CountsAsTiles ? (step * SearchSpace.LargestDistance) + bare.Distance : step;
+        if (_offers.TryGetValue(key, out FactoryOffer? known))
+        {
+            return known;
+        }
+
+        OperatingState state = bare.Point.At(MachineLoad.AtMost(Math.Pow(SizeStep, step + 1)));
+        bool isAbove = state.Strength.Worse >= 1;
+        FactoryOffer offer = new(isAbove, isAbove ? [] : factories.At(bare.Point, state, bare.Distance, errorAtMost));
+        _offers.Add(key, offer);
+        return offer;
+    }
+
+    private bool NeedsMoreAtomsThanDelivered(in TrialBase bare, double sites, in CycleTimes times) =>
+        !double.IsPositiveInfinity(limits.SupplyPerSecond)
+        && AtomSupply.DemandPerSecond(sites, bare.Point, bare.Point.StateOf(times)) > limits.SupplyPerSecond;
+
+    /// <summary>What factories a machine of some size may use.</summary>
+    private sealed record FactoryOffer(bool IsAboveThreshold, ImmutableArray<Factory> Factories);
 
     private static int SizeStepOf(double sites) => (int)Math.Floor(Math.Log(sites) / Math.Log(SizeStep));
 }

@@ -2,7 +2,6 @@ using System.Collections.Immutable;
 using FtEstimate.Cycles;
 using FtEstimate.Noise;
 using FtEstimate.Quantities;
-using FtEstimate.Scenarios;
 
 namespace FtEstimate.Sizing;
 
@@ -28,7 +27,8 @@ internal static class NoAnswerFinder
             : Obstacle.FailureProbability;
         return new NoAnswer(
             obstacle,
-            SentenceFor(obstacle, strength, needed, machine, space, limits),
+            SentenceFor(obstacle, strength, needed, machine, limits)
+                + (obstacle == Obstacle.Limits ? Relaxed(space, factories, limits) : ""),
             strength,
             needed,
             BlameOf(MachineDetail.LedgerOf(quietest, state), strength, needed),
@@ -80,20 +80,22 @@ internal static class NoAnswerFinder
 
     private static Candidate? Closest(SearchSpace space, FactoryChoice factories, SearchLimits limits)
     {
-        List<Candidate> found =
-        [
-            .. new MachineSearch(space, factories, limits, LogicStyle.LatticeSurgery).Run(),
-            .. new MachineSearch(space, factories, limits, LogicStyle.Transversal).Run(),
-        ];
+        List<Candidate> found = AllOf(space, factories, limits);
         return found.Count > 0 ? MachineSizing.Preferred(found, space.Scenario.Goal.Prefer) : null;
     }
 
+    private static List<Candidate> AllOf(SearchSpace space, FactoryChoice factories, SearchLimits limits) =>
+    [
+        .. new MachineSearch(space, factories, limits, LogicStyle.LatticeSurgery).Run(),
+        .. new MachineSearch(space, factories, limits, LogicStyle.Transversal).Run(),
+    ];
+
     private static string SentenceFor(
-        Obstacle obstacle, double strength, double? needed, SizedMachine? closest, SearchSpace space, SearchLimits limits)
+        Obstacle obstacle, double strength, double? needed, SizedMachine? closest, SearchLimits limits)
     {
         string lower = needed is { } value
             ? $" All noise together would have to fall by a factor of {Show.Significant(strength / value, 2)}."
-            : " Lower noise alone does not help.";
+            : " Lower noise alone is not enough.";
         return obstacle switch
         {
             Obstacle.AboveThreshold =>
@@ -101,16 +103,16 @@ internal static class NoAnswerFinder
             Obstacle.FailureProbability =>
                 $"No code distance up to {SearchSpace.LargestDistance} and no factory offered reaches the allowed failure probability " +
                 $"at {Show.Significant(strength, 2)} of the threshold.{lower}",
-            _ => $"A machine would do, but not within the limits: {OverLimits(closest!, space.Scenario, limits)}.{lower}",
+            _ => $"A machine would do, but not within the limits: {OverLimits(closest!, limits)}.{lower}",
         };
     }
 
-    private static string OverLimits(SizedMachine closest, Scenario scenario, SearchLimits limits)
+    private static string OverLimits(SizedMachine closest, SearchLimits limits)
     {
         var over = new List<string>();
         if (closest.Atoms.Total > limits.AtomsAtMost)
         {
-            over.Add($"the preferred machine takes {Show.Atoms(closest.Atoms.Total)} atoms where {Show.Atoms(limits.AtomsAtMost)} are allowed");
+            over.Add($"the preferred machine takes {Show.Atoms(closest.Atoms.Total)} atoms, the limit is {Show.Atoms(limits.AtomsAtMost)}");
         }
 
         if (closest.Elapsed.Seconds is not { } elapsed)
@@ -119,15 +121,56 @@ internal static class NoAnswerFinder
         }
         else if (elapsed > limits.ElapsedAtMost)
         {
-            over.Add($"it takes {Show.Duration(elapsed)} where {Show.Duration(limits.ElapsedAtMost)} are allowed");
+            over.Add($"it takes {Show.Duration(elapsed)}, the limit is {Show.Duration(limits.ElapsedAtMost)}");
         }
 
         if (closest.LossPerSecond > limits.SupplyPerSecond)
         {
-            over.Add($"it loses {Show.Atoms(closest.LossPerSecond)} atoms per second where {Show.Atoms(limits.SupplyPerSecond)} are delivered");
+            over.Add($"it loses {Show.Atoms(closest.LossPerSecond)} atoms per second, {Show.Atoms(limits.SupplyPerSecond)} are delivered");
         }
 
-        return over.Count > 0 ? string.Join("; ", over) : $"no single machine keeps all of them (preference: {scenario.Goal.Prefer})";
+        return over.Count > 0 ? string.Join("; ", over) : "each machine that keeps one of them breaks another";
+    }
+
+    /// <summary>For each limit the value that would do if the others stayed.</summary>
+    private static string Relaxed(SearchSpace space, FactoryChoice factories, SearchLimits limits)
+    {
+        MachineDetail detail = new(space, factories);
+        var enough = new List<string>();
+        if (Least(limits with { AtomsAtMost = double.PositiveInfinity }, machine => machine.Atoms.Total) is { } atoms && atoms > limits.AtomsAtMost)
+        {
+            enough.Add($"{Show.Atoms(atoms)} atoms");
+        }
+
+        if (Least(limits with { ElapsedAtMost = double.PositiveInfinity }, machine => machine.Elapsed.Seconds ?? double.PositiveInfinity) is { } seconds
+            && seconds > limits.ElapsedAtMost)
+        {
+            enough.Add($"{Show.Duration(seconds)} on the wall clock");
+        }
+
+        if (Least(limits with { SupplyPerSecond = double.PositiveInfinity }, machine => machine.LossPerSecond) is { } supply
+            && supply > limits.SupplyPerSecond)
+        {
+            enough.Add($"{Show.Atoms(supply)} atoms delivered per second");
+        }
+
+        return enough.Count > 0 ? $" What would do, the other limits kept: {string.Join(", or ", enough)}." : "";
+
+        double? Least(SearchLimits relaxed, Func<SizedMachine, double> measure)
+        {
+            if (relaxed == limits)
+            {
+                return null;
+            }
+
+            double least = double.PositiveInfinity;
+            foreach (Candidate candidate in AllOf(space, factories, relaxed))
+            {
+                least = Math.Min(least, measure(detail.Of(candidate)));
+            }
+
+            return double.IsFinite(least) ? least : null;
+        }
     }
 
     /// <summary>An operating point with all noise scaled.</summary>
