@@ -2,7 +2,7 @@ namespace FtEstimate.Noise;
 
 /// <summary>
 /// What lost atoms cost, first order: the straight boundary p_loss/a + p_Pauli/b = 1 with a(ℓ) = 0.07/ℓ^{1/3} for a life of ℓ gate slots
-/// (Baranes 2026, arXiv:2502.20558; read in a transcription). Not scaled with the law: a is a threshold of its own.
+/// (Baranes 2026, arXiv:2502.20558; read second-hand). Not scaled with the law: a is a threshold of its own.
 /// </summary>
 public static class LossWeights
 {

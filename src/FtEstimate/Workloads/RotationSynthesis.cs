@@ -20,7 +20,7 @@ public sealed record RotationSynthesis(string Name, double Slope, double Offset,
 
     /// <summary>Mixed fallback synthesis, mean count.</summary>
     public static RotationSynthesis MixedFallback { get; } = new(
-        "mixed-fallback", 0.53, 4.86, true, "Kliuchnikov 2023 (arXiv:2203.10064), mean count; error in diamond norm; from a secondary transcription, not checked against the paper");
+        "mixed-fallback", 0.53, 4.86, true, "Kliuchnikov 2023 (arXiv:2203.10064), mean count; error in diamond norm; read second-hand, not checked against the paper");
 
     /// <summary>All methods, the dearest at high precision first.</summary>
     public static ImmutableArray<RotationSynthesis> All { get; } = [Ross, RepeatUntilSuccess, MixedFallback];
