@@ -11,9 +11,9 @@ public sealed class NoAnswerTests
     [InlineData("machine.gates.cz_error=2e-2", "times the threshold: no code distance helps")]
     [InlineData("workload.generate.steps=1e12", "No code distance up to 99 and no factory offered reaches the allowed failure probability")]
     [InlineData("goal.failure_probability=1e-12", "No code distance up to 99 and no factory offered reaches the allowed failure probability")]
-    [InlineData("goal.atoms_at_most=1000", "atoms where 1000 are allowed")]
-    [InlineData("goal.run_at_most_days=0.001", "where 1.4 minutes are allowed")]
-    [InlineData("machine.supply.atoms_per_s=10", "atoms per second where 10 are delivered")]
+    [InlineData("goal.atoms_at_most=1000", "atoms, the limit is 1000")]
+    [InlineData("goal.run_at_most_days=0.001", ", the limit is 1.4 minutes")]
+    [InlineData("machine.supply.atoms_per_s=10", "atoms per second, 10 are delivered")]
     public async Task The_report_is_written_and_says_what_is_to_blame(string setting, string why)
     {
         using TemporaryFolder folder = new();
