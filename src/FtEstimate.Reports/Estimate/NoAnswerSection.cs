@@ -36,6 +36,12 @@ internal static class NoAnswerSection
             return;
         }
 
+        if (none.Reason == Obstacle.Limits && none.Blame.All(cause => cause.NeededPerLocation is null))
+        {
+            blocks.Add(new Paragraph("No single cause of error, improved alone, would be enough: the limits are what stands in the way."));
+            return;
+        }
+
         string goal = none.StrengthNeeded is { } needed
             ? $"The noise is at {Show.Significant(none.Strength, 3)} of the threshold (1, where no patch size helps) and must fall to {Show.Significant(needed, 3)}. "
             : $"The noise is at {Show.Significant(none.Strength, 3)} of the threshold (1, where no patch size helps). ";

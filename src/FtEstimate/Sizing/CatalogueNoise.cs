@@ -29,7 +29,7 @@ public sealed record CatalogueNoise(IScalingLaw Law, NoiseStrength Strength, dou
     public static CatalogueNoise Uniform(double error) =>
         new(ScalingLaws.Textbook, PatchError.Uniform(ScalingLaws.Textbook, error), error);
 
-    /// <summary>The factories: those no other beats, the whole grid, or one design held against the grid.</summary>
+    /// <summary>The factories: those that improve a state and that no other beats, the whole grid, or one design held against the grid.</summary>
     /// <param name="design">The one design; null: the grid.</param>
     /// <param name="beatenToo">Whether beaten ones are listed.</param>
     public ImmutableArray<CatalogueEntry> Entries(FactoryDesign? design, bool beatenToo)
@@ -42,7 +42,7 @@ public sealed record CatalogueNoise(IScalingLaw Law, NoiseStrength Strength, dou
             return [new CatalogueEntry(one, grid.Any(entry => Beats(entry.Factory, one)))];
         }
 
-        return beatenToo ? grid : [.. grid.Where(entry => !entry.Dominated)];
+        return beatenToo ? grid : [.. grid.Where(entry => !entry.Dominated && entry.Factory.OutputError < InjectedError)];
     }
 
     private static bool Beats(Factory one, Factory other) =>

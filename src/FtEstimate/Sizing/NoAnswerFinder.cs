@@ -12,28 +12,60 @@ internal static class NoAnswerFinder
 
     private const double LowestNoiseFactor = 1e-3;
 
+    private const double SecondsPerDay = 86_400;
+
     /// <summary>The explanation.</summary>
     public static NoAnswer Explain(SearchSpace space, FactoryChoice factories, SearchLimits limits)
     {
         OperatingPoint quietest = space.Points[0];
-        OperatingState state = quietest.At(MachineLoad.Of(2 * 9, 3));
-        double strength = state.Strength.Mean;
-        Candidate? closest = Closest(space, factories, limits.WithoutResources());
+        OperatingState onePatch = quietest.At(MachineLoad.Of(2 * 9, 3));
         double? factor = FactorNeeded(space, factories, limits);
-        double? needed = factor * strength;
-        SizedMachine? machine = closest is { } candidate ? new MachineDetail(space, factories).Of(candidate) : null;
-        Obstacle obstacle = machine is not null ? Obstacle.Limits
-            : state.Strength.Worse >= 1 ? Obstacle.AboveThreshold
-            : Obstacle.FailureProbability;
+        if (Closest(space, factories, limits.WithoutResources()) is { } candidate)
+        {
+            SizedMachine closest = new MachineDetail(space, factories).Of(candidate);
+            double strength = closest.State.Strength.Mean;
+            string sentence = $"A machine would do, but not within the limits: {OverLimits(closest, limits)}.{Lower(factor)}{Relaxed(space, factories, limits)}";
+            return new NoAnswer(
+                Obstacle.Limits, sentence, strength, factor * strength, BlameOf(closest.Ledger, strength, factor * strength), closest);
+        }
+
+        if (onePatch.Strength.Worse >= 1)
+        {
+            double strength = onePatch.Strength.Mean;
+            string sentence = $"The noise is {Show.Significant(strength, 3)} times the threshold: no code distance helps.{Lower(factor)}";
+            return new NoAnswer(
+                Obstacle.AboveThreshold, sentence, strength, factor * strength, BlameOf(MachineDetail.LedgerOf(quietest, onePatch), strength, factor * strength), null);
+        }
+
+        OperatingState full = AtFullSize(space, quietest);
+        double mean = full.Strength.Mean;
         return new NoAnswer(
-            obstacle,
-            SentenceFor(obstacle, strength, needed, machine, limits)
-                + (obstacle == Obstacle.Limits ? Relaxed(space, factories, limits) : ""),
-            strength,
-            needed,
-            BlameOf(MachineDetail.LedgerOf(quietest, state), strength, needed),
-            machine);
+            Obstacle.FailureProbability,
+            TooLarge(space, onePatch, full) + Lower(factor),
+            mean,
+            factor * mean,
+            BlameOf(MachineDetail.LedgerOf(quietest, full), mean, factor * mean),
+            null);
     }
+
+    /// <summary>A distance at which workloads of today's studies are run: where the growth of the round with the machine is looked at.</summary>
+    private const int TypicalDistance = 25;
+
+    private static OperatingState AtFullSize(SearchSpace space, OperatingPoint point)
+    {
+        double tiles = space.Layouts[0].Tiles;
+        return point.At(MachineLoad.Of(tiles * space.Patch.AtomsPerTile(TypicalDistance), TypicalDistance));
+    }
+
+    private static string TooLarge(SearchSpace space, in OperatingState onePatch, in OperatingState full) =>
+        $"No code distance up to {SearchSpace.LargestDistance} and no factory offered reaches the allowed failure probability. " +
+        $"A single patch has a round of {Show.Duration(onePatch.Times.RoundSeconds)} and noise at {Show.Significant(onePatch.Strength.Mean, 2)} of the threshold; " +
+        $"with all {Show.Significant(space.Layouts[0].Tiles, 3)} tiles at distance {TypicalDistance} it is {Show.Duration(full.Times.RoundSeconds)} " +
+        $"and {Show.Significant(full.Strength.Mean, 2)}, as limits on what is served at once lengthen the round.";
+
+    private static string Lower(double? factor) => factor is { } value
+        ? $" All noise together would have to fall by a factor of {Show.Significant(1 / value, 2)}."
+        : " Lower noise alone is not enough.";
 
     private static ImmutableArray<BlamedChannel> BlameOf(ErrorLedger ledger, double strength, double? needed) =>
     [
@@ -90,23 +122,6 @@ internal static class NoAnswerFinder
         .. new MachineSearch(space, factories, limits, LogicStyle.Transversal).Run(),
     ];
 
-    private static string SentenceFor(
-        Obstacle obstacle, double strength, double? needed, SizedMachine? closest, SearchLimits limits)
-    {
-        string lower = needed is { } value
-            ? $" All noise together would have to fall by a factor of {Show.Significant(strength / value, 2)}."
-            : " Lower noise alone is not enough.";
-        return obstacle switch
-        {
-            Obstacle.AboveThreshold =>
-                $"The noise is {Show.Significant(strength, 3)} times the threshold: no code distance helps.{lower}",
-            Obstacle.FailureProbability =>
-                $"No code distance up to {SearchSpace.LargestDistance} and no factory offered reaches the allowed failure probability " +
-                $"at {Show.Significant(strength, 2)} of the threshold.{lower}",
-            _ => $"A machine would do, but not within the limits: {OverLimits(closest!, limits)}.{lower}",
-        };
-    }
-
     private static string OverLimits(SizedMachine closest, SearchLimits limits)
     {
         var over = new List<string>();
@@ -121,7 +136,7 @@ internal static class NoAnswerFinder
         }
         else if (elapsed > limits.ElapsedAtMost)
         {
-            over.Add($"it takes {Show.Duration(elapsed)}, the limit is {Show.Duration(limits.ElapsedAtMost)}");
+            over.Add($"it takes {Show.Significant(elapsed / SecondsPerDay, 4)} days, the limit is {Show.Significant(limits.ElapsedAtMost / SecondsPerDay, 4)}");
         }
 
         if (closest.LossPerSecond > limits.SupplyPerSecond)
@@ -145,7 +160,7 @@ internal static class NoAnswerFinder
         if (Least(limits with { ElapsedAtMost = double.PositiveInfinity }, machine => machine.Elapsed.Seconds ?? double.PositiveInfinity) is { } seconds
             && seconds > limits.ElapsedAtMost)
         {
-            enough.Add($"{Show.Duration(seconds)} on the wall clock");
+            enough.Add($"{Show.Significant(seconds / SecondsPerDay, 4)} days on the wall clock");
         }
 
         if (Least(limits with { SupplyPerSecond = double.PositiveInfinity }, machine => machine.LossPerSecond) is { } supply

@@ -60,6 +60,7 @@ public sealed record SpinLattice(
             new Derivation("logical qubits", Text($"one per site, {Lattice.Rows} x {Lattice.Columns}, {Edges}"), Lattice.Sites, Counted),
             new Derivation("bonds", Text($"nearest neighbours, {Edges}"), Lattice.Bonds, Counted),
             StepsDerivation,
+            new Derivation("error of the product formula, worst case", "proven bound at these steps; not part of the failure", Bound.Error(Order, Time, Steps), BoundSource),
             new Derivation("rotations", IsSymmetric ? "steps (bonds + sites) + bonds" : "steps (bonds + sites)", Rotations, Counted),
             new Derivation("rotation depth", RotationDepthFormula, RotationDepth, "edge colouring, direction by direction"),
         ]);

@@ -30,7 +30,7 @@ public sealed class RotationSynthesisTests
     {
         Assert.False(RotationSynthesis.Ross.IsExpectation);
         Assert.True(RotationSynthesis.RepeatUntilSuccess.IsExpectation);
-        Assert.Contains("secondary transcription", RotationSynthesis.MixedFallback.Source, StringComparison.Ordinal);
+        Assert.Contains("second-hand", RotationSynthesis.MixedFallback.Source, StringComparison.Ordinal);
     }
 
     [Theory]
