@@ -32,7 +32,7 @@ internal static class AtomSection
         string more = extra > 0
             ? $" Each check needs {Words.Whole(extra + 1)} atoms in all (second bank or ensemble); those beyond the first are listed apart."
             : "";
-        return $"The algorithm has {Words.Count(space.Scenario.Workload.LogicalQubits, "logical qubit", "logical qubits")} on {Words.Whole(machine.Layout.Tiles)} patches of " +
+        return $"The algorithm has {Words.Count(space.Scenario.Workload.LogicalQubits, "logical qubit", "logical qubits")} on {Words.Count(machine.Layout.Tiles, "patch", "patches")} of " +
             $"{Words.Whole(perTile)} atoms ({space.Patch.Name} atoms at distance d = {machine.Distance}). " +
             $"Half of the atoms of patches and factories carry data, the other half are checks.{more}";
     }

@@ -13,6 +13,9 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     private readonly EntanglingGate _gate = GatePhases.GateOf(array, cycle.Scheme);
     private readonly LossCheckMethod _lossCheck = LossCheckPhases.MethodFor(array, cycle.Scheme);
 
+    /// <summary>Looks at a data atom per round: the share of looks that checks are spared.</summary>
+    private double LooksAtData => _lossCheck == LossCheckMethod.Swap ? 1 / Array.Coherence.LossCheck.EveryRounds : 0;
+
     /// <summary>The machine.</summary>
     public AtomArray Array { get; } = array;
 
@@ -63,7 +66,7 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         double vacuum = -ElementaryFunctions.ExpMinusOne(-times.RoundSeconds / Array.Coherence.VacuumLifetimeSeconds);
         double everyRounds = Array.Coherence.LossCheck.EveryRounds;
         double look = Cycle.Reading.LossPerLook;
-        double looksAtData = _lossCheck == LossCheckMethod.Swap ? 1 / everyRounds : 0;
+        double looksAtData = LooksAtData;
         double looksAtChecks = 1 - looksAtData + (_lossCheck == LossCheckMethod.ExtraCheck ? 1 / everyRounds : 0);
         double extraGates = _gate.LossPerAtom * LossCheckPhases.ExtraLayers(_lossCheck) / everyRounds;
         double lossPerMove = Array.Reach is MovedAtoms moved ? moved.LossPerMove : 0;
@@ -152,7 +155,7 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     private void VisitLoss<TSink>(in AtomLoss loss, ref TSink sink)
         where TSink : struct, IChannelSink
     {
-        double lookLater = Cycle.Scheme is MovedApart { ReadInRound: false } ? Cycle.Reading.LossPerLook : 0;
+        double lookLater = Cycle.Scheme is MovedApart { ReadInRound: false } ? Cycle.Reading.LossPerLook * (1 - LooksAtData) : 0;
         double data = loss.PerGateSlot + (loss.DataPerRound / SyndromeCycle.Layers);
         double check = loss.PerGateSlot + (Math.Max(loss.CheckPerRound - lookLater, 0) / SyndromeCycle.Layers);
         bool tells = Cycle.Scheme.Detector.TellsLoss;

@@ -49,6 +49,36 @@ public sealed class AtomNoiseTests
         Assert.Equal(expected, error, 1e-18);
     }
 
+    // an image taken after the round takes atoms that are no longer in the code; gates, moves and vacuum still count
+    [Theory]
+    [InlineData(LossCheckMethod.None)]
+    [InlineData(LossCheckMethod.Swap)]
+    public void Loss_in_a_later_image_leaves_the_other_losses_of_checks_as_they_are(LossCheckMethod lossCheck)
+    {
+        ErrorChannel without = ChecksLostInALaterImage(0);
+        ErrorChannel with = ChecksLostInALaterImage(0.01);
+
+        Assert.True(without.PerLocation > 0.5e-4, "more than the half of cz_loss that falls on a check");
+        Assert.Equal(without.PerLocation, with.PerLocation, 1e-15);
+
+        ErrorChannel ChecksLostInALaterImage(double lossPerLook)
+        {
+            AtomArray array = BenchMachine.Array with
+            {
+                Coherence = BenchMachine.Array.Coherence with { LossCheck = new DataLossCheck(lossCheck, 2) },
+                Readout = BenchMachine.Apart with
+                {
+                    Detector = new StatedReadout(1e-3, 1e-3, lossPerLook, 100e-6, 0, TellsLoss: true),
+                    DistanceMetres = null,
+                    ExchangeSeconds = 1e-3,
+                    ReadInRound = false,
+                },
+            };
+            AtomNoise noise = BenchMachine.Noise(array, 0.00529);
+            return noise.Ledger(noise.Cycle.Times(OnePatch)).Channels.Single(channel => channel.Name == "Loss of check atoms");
+        }
+    }
+
     // relaxation is neglected, so waiting is pure Z and flips logical X alone
     [Fact]
     public void Waiting_during_readout_counts_in_one_basis_only_when_nothing_relaxes()
