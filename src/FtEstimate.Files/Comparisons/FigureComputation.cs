@@ -58,7 +58,7 @@ internal sealed class FigureComputation(string folder)
 
     private static double SuppressionAtThree(SizedMachine machine)
     {
-        NoiseStrength onePatch = machine.Point.At(MachineLoad.Of(2 * 9, 3)).Strength;
+        NoiseStrength onePatch = machine.Point.At(MachineLoad.SinglePatch).Strength;
         return PatchError.SuppressionFactor(ScalingLaws.PublishedFit, onePatch, 3);
     }
 

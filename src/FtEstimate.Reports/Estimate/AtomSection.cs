@@ -81,7 +81,7 @@ internal static class AtomSection
         if (optics.TrapPowerWatts is { } power)
         {
             blocks.Add(new Paragraph(
-                $"A beam of {Show.Significant(power, 2)} W is far into laser class 4: dangerous to eyes and skin, and a fire hazard. " +
+                $"{Show.Significant(power, 2)} W is the light at the atoms; the lasers behind it are stronger. Beams above 0.5 W are class 4: dangerous to eyes and skin, and a fire hazard. " +
                 "Local laser-safety codes and the laser-safety officer decide what is allowed. The figure is a planning number and no design value.",
                 Tone.Caution));
         }

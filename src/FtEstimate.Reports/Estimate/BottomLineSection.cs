@@ -64,10 +64,14 @@ internal static class BottomLineSection
 
     private static string Sentence(Scenario scenario, SizedMachine machine)
     {
-        string elapsed = machine.Elapsed is { FinishesInPractice: true, Seconds: { } seconds }
-            ? $"; expect {Show.Duration(seconds)} on the wall clock"
-            : "";
         string shots = scenario.Workload.Shots > 1 ? "each shot of " : "";
+        if (machine.Elapsed is not { FinishesInPractice: true, Seconds: { } seconds })
+        {
+            return $"{Show.Atoms(machine.Atoms.Total)} atoms would complete {shots}“{scenario.Workload.Name}” on “{scenario.Machine.Name}” in " +
+                $"{Show.Duration(machine.RunSeconds)} of run time without a stop, but between stops the run does not finish in practice.";
+        }
+
+        string elapsed = $"; expect {Show.Duration(seconds)} on the wall clock";
         return $"{Show.Atoms(machine.Atoms.Total)} atoms and {Show.Duration(machine.RunSeconds)} of run time complete {shots}" +
             $"“{scenario.Workload.Name}” on “{scenario.Machine.Name}”{elapsed}.";
     }

@@ -31,6 +31,11 @@ internal static class ClockSection
 
     private static string Steps(Scenario scenario, SizedMachine machine)
     {
+        if (machine.Demand.TStates == 0)
+        {
+            return "The algorithm uses no magic states; its logical gates are done layer by layer.";
+        }
+
         string rotations = scenario.Workload.Rotations > 0
             ? $" Each of its {Show.Significant(scenario.Workload.Rotations, 3)} rotations takes {Show.Significant(machine.Demand.TPerRotation, 3)} magic states " +
                 $"at an error of {Show.Probability(machine.Demand.RotationError)}."

@@ -19,7 +19,7 @@ internal static class NoAnswerSection
         BottomLineSection.AddCautions(blocks, subject);
         if (none.Closest is { } closest)
         {
-            blocks.Add(new Paragraph("With the limits on atoms, time and supply dropped, this machine comes closest:"));
+            blocks.Add(new Paragraph("With the limits on atoms, time and supply dropped, this machine would be preferred:"));
             blocks.Add(FigureTable.Of(AnswerFigures.Of(subject.Space, closest), withMeaning: true));
         }
 

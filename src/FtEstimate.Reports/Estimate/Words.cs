@@ -10,9 +10,10 @@ namespace FtEstimate.Reports.Estimate;
 internal static class Words
 {
     /// <summary>What sets the pace.</summary>
-    public static string Pace(Pace pace) => pace switch
+    public static string Pace(SizedMachine machine) => machine.Clock.Pace switch
     {
         Sizing.Pace.Supply => "supply of magic states",
+        Sizing.Pace.Consumption when machine.Demand.TStates == 0 => "logical gates, layer by layer",
         Sizing.Pace.Consumption => "consumption of magic states",
         _ => "reaction time",
     };

@@ -59,7 +59,7 @@ internal static class AnswerFigures
         new(Round, machine.Clock.RoundSeconds),
         Figure.Of(Readout, Words.Readout(machine.Point)),
         Figure.Of(machine.Layout.Style == LogicStyle.LatticeSurgery ? Surgery : Transversal, Words.Style(machine.Layout)),
-        Figure.Of(LimitedBy, machine.RunSeconds > 0 ? Words.Pace(machine.Clock.Pace) : "nothing: no timed work is stated"),
+        Figure.Of(LimitedBy, machine.RunSeconds > 0 ? Words.Pace(machine) : "nothing: no timed work is stated"),
         new(Loss, machine.LossPerSecond, Note: DeliveryNote(space)),
     ];
 

@@ -15,4 +15,7 @@ public readonly record struct MachineLoad(double DataAtoms, double CheckSites, d
 
     /// <summary>The load of so many sites at whatever distance: a pair for every data atom, which no distance exceeds.</summary>
     public static MachineLoad AtMost(double sites) => new(sites / 2, sites / 2, sites / 2);
+
+    /// <summary>A single patch of distance 3.</summary>
+    public static MachineLoad SinglePatch => Of(2 * 9, 3);
 }

@@ -13,6 +13,9 @@ public static class Exposures
 
     private const double LongestSeconds = 1;
 
+    /// <summary>Background beyond which histograms would be cut: no camera is run there.</summary>
+    private const double MostBackgroundCounts = 1_000;
+
     /// <summary>
     /// The stated exposure; or, when it is left to the sizing, the points of a fixed grid from a hundredth of the exposure with the fewest flips
     /// up to that one: a longer look flips more and waits longer.
@@ -50,6 +53,11 @@ public static class Exposures
         double fewest = 1;
         for (int i = 0; Grid(i) <= LongestSeconds; i++)
         {
+            if (i > 0 && counting.BackgroundPerSecond * Grid(i) > MostBackgroundCounts)
+            {
+                break;
+            }
+
             double flip = PhotonStatistics.Read(counting, atoms, Grid(i)).Flip;
             if (flip < fewest)
             {

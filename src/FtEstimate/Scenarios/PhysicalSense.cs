@@ -22,6 +22,7 @@ public static class PhysicalSense
         RunningRules.Check(draft, faults);
         WorkloadRules.Check(draft, faults);
         FactoryRules.Check(draft, faults);
+        LogicRules.Check(draft, faults);
         return [.. faults];
     }
 

@@ -99,7 +99,7 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
 
         CycleTimes times = TimesAt(bare.Point, bare.Layout, bare.Distance, bare.TileAtoms + factoryAtoms);
         Pacing pacing = new(
-            bare, times.RoundSeconds, bare.Point.ReactionSeconds(bare.Distance), factory is null ? 0 : factory.RoundsPerOutput / count);
+            bare, times.RoundSeconds, bare.Point.ReactionSeconds(bare.Distance), factory is null ? 0 : factory.RoundsPerOutput / count, factory?.RoundsPerBatch ?? 0);
         TStateDemand demand = TStateDemand.For(_scenario.Workload, space.Synthesis, RotationErrorWithin(leftForRotations));
         if (unbeaten.Beats(atoms, pacing.Clock(demand).RunSeconds))
         {
@@ -178,10 +178,11 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             && elapsed <= limits.ElapsedAtMost);
 
     /// <summary>What sets the clock of one machine, whatever its rotations cost.</summary>
-    private readonly record struct Pacing(TrialBase Bare, double RoundSeconds, double ReactionSeconds, double SupplyRoundsPerT)
+    private readonly record struct Pacing(
+        TrialBase Bare, double RoundSeconds, double ReactionSeconds, double SupplyRoundsPerT, double BatchRounds)
     {
         public RunClock Clock(in TStateDemand demand) =>
-            RunClock.Of(Bare.Layout, demand, Bare.Distance, RoundSeconds, ReactionSeconds, SupplyRoundsPerT);
+            RunClock.Of(Bare.Layout, demand, Bare.Distance, RoundSeconds, ReactionSeconds, SupplyRoundsPerT, BatchRounds);
     }
 
     private readonly record struct MetGoal(RunClock Clock, FailureBudget Failure, double RotationError);

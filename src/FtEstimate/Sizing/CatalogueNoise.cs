@@ -19,7 +19,7 @@ public sealed record CatalogueNoise(IScalingLaw Law, NoiseStrength Strength, dou
         OperatingPoint point = result.Best?.Point ?? space.Points[0];
         OperatingState state = point.At(result.Best is { } machine
             ? MachineLoad.Of(machine.Atoms.Sites, machine.Distance)
-            : MachineLoad.Of(2 * 9, 3));
+            : MachineLoad.SinglePatch);
         return new CatalogueNoise(
             space.Law, state.Strength, space.Scenario.Method.InjectedError ?? point.InjectedError(state));
     }

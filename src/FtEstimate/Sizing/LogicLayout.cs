@@ -30,8 +30,9 @@ public sealed record LogicLayout(
     /// <summary>The layouts a scenario leaves open, in a fixed order.</summary>
     /// <param name="workload">The workload.</param>
     /// <param name="method">What is fixed.</param>
+    /// <param name="synthesis">How rotations are made of T gates.</param>
     /// <param name="movesAtoms">Whether the machine can bring patches together, which transversal gates need.</param>
-    public static ImmutableArray<LogicLayout> ToTry(Workload workload, Method method, bool movesAtoms)
+    public static ImmutableArray<LogicLayout> ToTry(Workload workload, Method method, RotationSynthesis synthesis, bool movesAtoms)
     {
         var layouts = ImmutableArray.CreateBuilder<LogicLayout>();
         if (method.Style is null or LogicStyles.Surgery)
@@ -43,7 +44,7 @@ public sealed record LogicLayout(
             || (method.Style is null && movesAtoms && method.Block is null && method.Patches is null);
         if (transversal)
         {
-            AddTransversal(layouts, workload, method);
+            AddTransversal(layouts, workload, method, synthesis);
         }
 
         return layouts.ToImmutable();
@@ -70,9 +71,10 @@ public sealed record LogicLayout(
         new(LogicStyle.LatticeSurgery, name, tiles, stepsPerT, 1, 0);
 
     /// <summary>One more patch per T lane; lanes double up to the parallelism of the workload.</summary>
-    private static void AddTransversal(ImmutableArray<LogicLayout>.Builder layouts, Workload workload, Method method)
+    private static void AddTransversal(
+        ImmutableArray<LogicLayout>.Builder layouts, Workload workload, Method method, RotationSynthesis synthesis)
     {
-        double parallelism = Math.Max(1, TStateDemand.Parallelism(workload));
+        double parallelism = Math.Max(1, TStateDemand.Parallelism(workload, synthesis));
         double patches = method.Patches ?? Math.Ceiling(workload.LogicalQubits * (1 + method.RoutingFraction));
         double[] gates = method.GatesPerRound is { } fixedGates ? [fixedGates] : GatesPerRoundToTry;
         for (double lanes = 1; lanes <= parallelism; lanes *= 2)

@@ -29,7 +29,7 @@ internal sealed class MachineDetail(SearchSpace space, FactoryChoice factories)
             scenario.Workload, space.Synthesis, candidate.RotationError > 0 ? candidate.RotationError : 0.5);
         double reaction = candidate.Point.ReactionSeconds(distance);
         RunClock clock = RunClock.Of(
-            layout, demand, distance, state.Times.RoundSeconds, reaction, factory is null ? 0 : factory.RoundsPerOutput / candidate.FactoryCount);
+            layout, demand, distance, state.Times.RoundSeconds, reaction, factory is null ? 0 : factory.RoundsPerOutput / candidate.FactoryCount, factory?.RoundsPerBatch ?? 0);
         double tiles = layout.Tiles + (factories.CountsAsTiles ? TileFactory.Tiles * candidate.FactoryCount : 0);
         FailureBudget failure = new(
             FailureComposition.ExpectedFaults(tiles * clock.Rounds, perRound),
@@ -76,7 +76,7 @@ internal sealed class MachineDetail(SearchSpace space, FactoryChoice factories)
         double moves = layout.GatesPerRound * point.PatchMoveSeconds(distance);
         return moves > 0
             ? phases.Add(new CyclePhase(
-                "Patch moves of transversal gates", CyclePart.Gates, state.Times.RoundSeconds - moves, moves, layout.GatesPerRound, DataState.Waiting))
+                "Patch moves of transversal gates", CyclePart.Gates, state.Times.RoundSeconds - moves, moves, 1, DataState.Waiting))
             : phases;
     }
 }

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using FtEstimate.Machines;
 using FtEstimate.MagicStates;
 using FtEstimate.Scenarios;
 
@@ -39,18 +40,22 @@ public sealed class MachineSizing(FactoryCatalogue catalogue)
 
         MachineDetail detail = new(space, factories);
         Preference prefer = scenario.Goal.Prefer;
-        SizedMachine[] rows = [.. TradeOff.Thin(merged.Members, Preferred(merged.Members, prefer)).Select(detail.Of)];
+        Running running = scenario.Machine.Running;
+        SizedMachine[] rows = [.. TradeOff.Thin(merged.Members, Preferred(merged.Members, prefer, running)).Select(detail.Of)];
 
         // at the exact noise of the factories run times shift by a little: enough to overtake a neighbour
         ImmutableArray<SizedMachine> unbeaten = [.. rows.Where(row => !rows.Any(other => Beats(other, row)))];
-        SizedMachine best = unbeaten[0];
+        SizedMachine best = unbeaten[^1];
         foreach (SizedMachine machine in unbeaten)
         {
-            best = Measure(machine, prefer) < Measure(best, prefer) ? machine : best;
+            bool isBetter = machine.Elapsed.FinishesInPractice == best.Elapsed.FinishesInPractice
+                ? Measure(machine, prefer) < Measure(best, prefer)
+                : machine.Elapsed.FinishesInPractice;
+            best = isBetter ? machine : best;
         }
 
         SizedMachine? otherStyle = perStyle
-            .Select(found => Preferred(found, prefer))
+            .Select(found => Preferred(found, prefer, running))
             .Where(candidate => candidate.Layout.Style != best.Layout.Style)
             .Select(detail.Of)
             .FirstOrDefault();
@@ -61,21 +66,28 @@ public sealed class MachineSizing(FactoryCatalogue catalogue)
         one.Atoms.Total <= other.Atoms.Total && one.RunSeconds <= other.RunSeconds
         && (one.Atoms.Total < other.Atoms.Total || one.RunSeconds < other.RunSeconds);
 
-    /// <summary>The candidate with the smallest preferred measure; ties go to fewer atoms, then to the shorter run.</summary>
-    internal static Candidate Preferred(IReadOnlyList<Candidate> candidates, Preference preference)
+    /// <summary>
+    /// The candidate with the smallest preferred measure, ties going to fewer atoms. Machines whose run does not get through between stops
+    /// are preferred only when there is no other.
+    /// </summary>
+    internal static Candidate Preferred(IReadOnlyList<Candidate> candidates, Preference preference, Running running)
     {
         Candidate best = candidates[0];
         foreach (Candidate candidate in candidates)
         {
+            bool finishes = Finishes(candidate, running);
             double difference = Measure(candidate, preference) - Measure(best, preference);
-            if (difference < 0 || (difference == 0 && candidate.Atoms < best.Atoms))
-            {
-                best = candidate;
-            }
+            bool isBetter = finishes == Finishes(best, running)
+                ? difference < 0 || (difference == 0 && candidate.Atoms < best.Atoms)
+                : finishes;
+            best = isBetter ? candidate : best;
         }
 
         return best;
     }
+
+    private static bool Finishes(Candidate candidate, Running running) =>
+        ElapsedTime.Of(candidate.RunSeconds, 1, 0, running).FinishesInPractice;
 
     /// <summary>What a preference wants small.</summary>
     internal static double Measure(Candidate candidate, Preference preference) =>

@@ -1,5 +1,7 @@
 using System.Collections.Immutable;
 using FtEstimate.Cycles;
+using FtEstimate.Machines;
+using FtEstimate.MagicStates;
 using FtEstimate.Noise;
 using FtEstimate.Quantities;
 
@@ -18,13 +20,13 @@ internal static class NoAnswerFinder
     public static NoAnswer Explain(SearchSpace space, FactoryChoice factories, SearchLimits limits)
     {
         OperatingPoint quietest = space.Points[0];
-        OperatingState onePatch = quietest.At(MachineLoad.Of(2 * 9, 3));
+        OperatingState onePatch = quietest.At(MachineLoad.SinglePatch);
         double? factor = FactorNeeded(space, factories, limits);
         if (Closest(space, factories, limits.WithoutResources()) is { } candidate)
         {
             SizedMachine closest = new MachineDetail(space, factories).Of(candidate);
             double strength = closest.State.Strength.Mean;
-            string sentence = $"A machine would do, but not within the limits: {OverLimits(closest, limits)}.{Lower(factor)}{Relaxed(space, factories, limits)}";
+            string sentence = $"A machine would do, but not within the limits: {OverLimits(closest, limits)}.{Relaxed(space, factories, limits)}{Lower(space, factor)}";
             return new NoAnswer(
                 Obstacle.Limits, sentence, strength, factor * strength, BlameOf(closest.Ledger, strength, factor * strength), closest);
         }
@@ -32,16 +34,18 @@ internal static class NoAnswerFinder
         if (onePatch.Strength.Worse >= 1)
         {
             double strength = onePatch.Strength.Mean;
-            string sentence = $"The noise is {Show.Significant(strength, 3)} times the threshold: no code distance helps.{Lower(factor)}";
+            string sentence = $"The noise is {Show.Significant(strength, 3)} times the threshold: no code distance helps.{Lower(space, factor)}";
             return new NoAnswer(
                 Obstacle.AboveThreshold, sentence, strength, factor * strength, BlameOf(MachineDetail.LedgerOf(quietest, onePatch), strength, factor * strength), null);
         }
 
         OperatingState full = AtFullSize(space, quietest);
+        bool unlimitedWouldDo = WithoutGroups(space) is { } unlimited
+            && Closest(unlimited, new FactoryChoice(unlimited, new FactoryCatalogue()), limits.WithoutResources()) is not null;
         double mean = full.Strength.Mean;
         return new NoAnswer(
             Obstacle.FailureProbability,
-            TooLarge(space, onePatch, full) + Lower(factor),
+            TooLarge(space, onePatch, full) + (unlimitedWouldDo ? GroupsAreTheObstacle : "") + Lower(space, factor),
             mean,
             factor * mean,
             BlameOf(MachineDetail.LedgerOf(quietest, full), mean, factor * mean),
@@ -63,9 +67,36 @@ internal static class NoAnswerFinder
         $"with all {Show.Significant(space.Layouts[0].Tiles, 3)} tiles at distance {TypicalDistance} it is {Show.Duration(full.Times.RoundSeconds)} " +
         $"and {Show.Significant(full.Strength.Mean, 2)}, as limits on what is served at once lengthen the round.";
 
-    private static string Lower(double? factor) => factor is { } value
-        ? $" All noise together would have to fall by a factor of {Show.Significant(1 / value, 2)}."
-        : " Lower noise alone is not enough.";
+    private const string GroupsAreTheObstacle =
+        " Without limits on the pairs, checks and atoms served at once a machine would do: these limits are the obstacle.";
+
+    /// <summary>The same search with everything served at once; null for an abstract machine.</summary>
+    private static SearchSpace? WithoutGroups(SearchSpace space)
+    {
+        if (space.Scenario.Machine.Apparatus is not AtomArray array)
+        {
+            return null;
+        }
+
+        AtomArray unlimited = array with
+        {
+            Gates = array.Gates with { CzPairsAtOnce = double.PositiveInfinity, OneQubitAtOnce = double.PositiveInfinity },
+            Reach = array.Reach is MovedAtoms moved ? moved with { MovedAtOnce = double.PositiveInfinity } : array.Reach,
+            Readout = array.Readout is Shelved shelved ? shelved with { SelectAtOnce = double.PositiveInfinity } : array.Readout,
+        };
+        return SearchSpace.Of(space.Scenario with { Machine = space.Scenario.Machine with { Apparatus = unlimited } });
+    }
+
+    private static string Lower(SearchSpace space, double? factor)
+    {
+        string held = space.Scenario.Method.InjectedError is null ? "" : " The injected error is fixed by the scenario and stays as it is.";
+        return factor switch
+        {
+            null => $" Lower noise alone is not enough.{held}",
+            > 0.9 => $" All noise together would have to fall by {Show.Percent(1 - factor.Value)}.{held}",
+            _ => $" All noise together would have to fall by a factor of {Show.Significant(1 / factor.Value, 2)}.{held}",
+        };
+    }
 
     private static ImmutableArray<BlamedChannel> BlameOf(ErrorLedger ledger, double strength, double? needed) =>
     [
@@ -113,7 +144,7 @@ internal static class NoAnswerFinder
     private static Candidate? Closest(SearchSpace space, FactoryChoice factories, SearchLimits limits)
     {
         List<Candidate> found = AllOf(space, factories, limits);
-        return found.Count > 0 ? MachineSizing.Preferred(found, space.Scenario.Goal.Prefer) : null;
+        return found.Count > 0 ? MachineSizing.Preferred(found, space.Scenario.Goal.Prefer, space.Scenario.Machine.Running) : null;
     }
 
     private static List<Candidate> AllOf(SearchSpace space, FactoryChoice factories, SearchLimits limits) =>
@@ -169,7 +200,7 @@ internal static class NoAnswerFinder
             enough.Add($"{Show.Atoms(supply)} atoms delivered per second");
         }
 
-        return enough.Count > 0 ? $" What would do, the other limits kept: {string.Join(", or ", enough)}." : "";
+        return enough.Count > 0 ? $" What would do, with the other limits and the noise as they are: {string.Join(", or ", enough)}." : "";
 
         double? Least(SearchLimits relaxed, Func<SizedMachine, double> measure)
         {

@@ -48,15 +48,17 @@ public readonly record struct RunClock(
     /// <param name="roundSeconds">One round, patch moves included.</param>
     /// <param name="reactionSeconds">One reaction.</param>
     /// <param name="supplyRoundsPerT">Rounds per magic state of all factories together; 0: unlimited.</param>
+    /// <param name="batchRounds">Rounds of one batch, which the first state takes at least; 0: unlimited supply.</param>
     public static RunClock Of(
         LogicLayout layout,
         in TStateDemand demand,
         int distance,
         double roundSeconds,
         double reactionSeconds,
-        double supplyRoundsPerT)
+        double supplyRoundsPerT,
+        double batchRounds = 0)
     {
-        double supply = demand.TStates * supplyRoundsPerT * roundSeconds;
+        double supply = demand.TStates > 0 ? Math.Max(demand.TStates * supplyRoundsPerT, batchRounds) * roundSeconds : 0;
         double reaction = demand.ReactionDepth * reactionSeconds;
         if (layout.Style == LogicStyle.LatticeSurgery)
         {

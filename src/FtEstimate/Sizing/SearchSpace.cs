@@ -43,7 +43,7 @@ public sealed record SearchSpace(
             patch,
             synthesis,
             PointsOf(scenario.Machine, law),
-            LogicLayout.ToTry(scenario.Workload, scenario.Method, movesAtoms));
+            LogicLayout.ToTry(scenario.Workload, scenario.Method, synthesis, movesAtoms));
     }
 
     /// <summary>
@@ -57,13 +57,12 @@ public sealed record SearchSpace(
         }
 
         ChannelWeights weights = ChannelWeights.For(law.Threshold);
-        MachineLoad onePatch = MachineLoad.Of(2, 3);
         var tried = new List<TriedPoint>();
         foreach (double exposure in Exposures.ToTry(array.Readout))
         {
             var noise = new AtomNoise(array, SyndromeCycle.Of(array, array.Readout, exposure), weights);
             var point = new AtomOperatingPoint(noise, machine.Control);
-            tried.Add(new TriedPoint(point, point.At(onePatch)));
+            tried.Add(new TriedPoint(point, point.At(MachineLoad.SinglePatch)));
         }
 
         return WorthTrying(tried);

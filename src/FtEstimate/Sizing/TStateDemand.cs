@@ -42,11 +42,11 @@ public readonly record struct TStateDemand(
             workload.Rotations * (workload.Rotations > 0 ? rotationError : 0));
     }
 
-    /// <summary>T states that can be consumed side by side on average.</summary>
-    public static double Parallelism(Workload workload)
+    /// <summary>T states that can be consumed side by side on average; it hardly depends on the precision of rotations, taken as 1e-9.</summary>
+    public static double Parallelism(Workload workload, RotationSynthesis synthesis)
     {
         const double anyPrecision = 1e-9;
-        TStateDemand demand = For(workload, RotationSynthesis.RepeatUntilSuccess, anyPrecision);
+        TStateDemand demand = For(workload, synthesis, anyPrecision);
         return demand.ReactionDepth > 0 ? demand.TStates / demand.ReactionDepth : 1;
     }
 }

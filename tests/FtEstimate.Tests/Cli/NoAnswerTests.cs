@@ -12,7 +12,7 @@ public sealed class NoAnswerTests
     [InlineData("workload.generate.steps=1e12", "No code distance up to 99 and no factory offered reaches the allowed failure probability")]
     [InlineData("goal.failure_probability=1e-12", "No code distance up to 99 and no factory offered reaches the allowed failure probability")]
     [InlineData("goal.atoms_at_most=1000", "atoms, the limit is 1000")]
-    [InlineData("goal.run_at_most_days=0.001", ", the limit is 1.4 minutes")]
+    [InlineData("goal.run_at_most_days=0.001", "days, the limit is 0.001")]
     [InlineData("machine.supply.atoms_per_s=10", "atoms per second, 10 are delivered")]
     public async Task The_report_is_written_and_says_what_is_to_blame(string setting, string why)
     {

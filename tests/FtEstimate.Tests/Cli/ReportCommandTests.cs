@@ -23,6 +23,20 @@ public sealed class ReportCommandTests
         Assert.Equal(Sections, Regex.Matches(run.Output, "^## (.+)$", RegexOptions.Multiline).Select(match => match.Groups[1].Value));
     }
 
+    // the README shows two of the three columns of the table
+    [Fact]
+    public async Task The_excerpt_in_the_readme_is_what_the_report_says()
+    {
+        string report = (await CommandRun.FirstReportWith()).Output;
+        string[] excerpt = [.. File.ReadLines(RepositoryFiles.At("README.md")).Where(line => line.StartsWith("> ", StringComparison.Ordinal))];
+
+        Assert.True(excerpt.Length > 15);
+        foreach (string line in excerpt.Select(line => line[2..]).Where(line => !line.StartsWith("|--", StringComparison.Ordinal) && line != "**Bottom line**"))
+        {
+            Assert.Contains(line.StartsWith('|') ? line[..^1].TrimEnd() : line, report, StringComparison.Ordinal);
+        }
+    }
+
     [Fact]
     public async Task Pictures_are_written_beside_the_report_and_every_link_finds_its_picture()
     {

@@ -40,7 +40,7 @@ public sealed class NoAnswerTests
 
         Assert.All([atoms, time, supply], none => Assert.Equal(Obstacle.Limits, none.Reason));
         Assert.All([atoms, time, supply], none => Assert.NotNull(none.Closest));
-        Assert.Contains("atoms where", atoms.Sentence, StringComparison.Ordinal);
+        Assert.Contains("atoms, the limit is", atoms.Sentence, StringComparison.Ordinal);
         Assert.Contains("it takes", time.Sentence, StringComparison.Ordinal);
         Assert.Contains("delivered", supply.Sentence, StringComparison.Ordinal);
     }
