@@ -22,7 +22,7 @@ internal static class FactoriesCommand
         {
             Description = "Every location errs with probability P, textbook law, instead of a scenario",
             HelpName = "P",
-            CustomParser = CommandLineNumbers.Between(0, LargestUniform),
+            CustomParser = CommandLineNumbers.Between("--uniform", 0, LargestUniform),
         };
         Option<bool> all = new("--all") { Description = "List the whole grid, beaten designs too" };
         Option<string?> design = new("--design") { Description = "Evaluate one design, e.g. \"15-to-1:13,5,5*6 > 15-to-1:29,11,13\"", HelpName = "DESIGN" };
@@ -79,7 +79,8 @@ internal static class FactoriesCommand
             reading?.Scenario is { } asked ? $"Magic states for {asked.Title}" : FormattableString.Invariant($"Magic states at a uniform error of {request.Uniform}"),
             noise.Law.Name,
             noise.Strength,
-            noise.InjectedError);
+            noise.InjectedError,
+            request.All || design is not null ? null : noise.ErrorAtMost);
         ImmutableArray<CatalogueEntry> entries = noise.Entries(design, request.All);
         bool written = ReportOutput.Write(
             FactoriesReport.Of(question, entries), () => JsonFigures.Of(question, entries), places, output, error);

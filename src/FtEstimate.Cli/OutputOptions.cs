@@ -44,14 +44,14 @@ internal sealed class OutputOptions
 internal static class CommandLineNumbers
 {
     /// <summary>Parses a number strictly between two bounds; the library's own parser would follow the culture.</summary>
-    public static Func<ArgumentResult, double?> Between(double low, double high) => result =>
+    public static Func<ArgumentResult, double?> Between(string option, double low, double high) => result =>
     {
         string text = result.Tokens[0].Value;
         bool isNumber = double.TryParse(
             text, System.Globalization.NumberStyles.Float, System.Globalization.CultureInfo.InvariantCulture, out double value);
         if (!isNumber || !(value > low && value < high))
         {
-            result.AddError(FormattableString.Invariant($"'{text}' is not a number between {low} and {high}"));
+            result.AddError(FormattableString.Invariant($"{option}: expected a number between {low} and {high}, found '{text}'"));
             return null;
         }
 

@@ -12,7 +12,9 @@ namespace FtEstimate.Reports.Listings;
 /// <param name="LawName">Scaling law.</param>
 /// <param name="Strength">Noise strength, in units of the threshold.</param>
 /// <param name="InjectedError">Pauli probability of an injected state.</param>
-public sealed record FactoryQuestion(string Title, string LawName, NoiseStrength Strength, double InjectedError);
+/// <param name="ErrorAtMost">Largest output error of use, when only such factories are listed; null: all are.</param>
+public sealed record FactoryQuestion(
+    string Title, string LawName, NoiseStrength Strength, double InjectedError, double? ErrorAtMost = null);
 
 /// <summary>The catalogue of magic-state factories at one noise.</summary>
 public static class FactoriesReport
@@ -37,7 +39,7 @@ public static class FactoriesReport
                         new Paragraph(
                             $"{Words.Count(entries.Length, "factory", "factories")}, {Words.Whole(unbeaten)} unbeaten: no other is at least as good in atoms, rounds per state and error at once. " +
                             $"The noise is at {Show.Significant(question.Strength.Mean, 3)} of the threshold by the law {question.LawName}, and an injected state errs " +
-                            $"with probability {Show.Probability(question.InjectedError)}."),
+                            $"with probability {Show.Probability(question.InjectedError)}.{Needed(question)}"),
                         CatalogueTable(entries),
                         new Paragraph(
                             "Names give the distances dX, dZ and dm of a block; *n is the number of blocks that feed the next level. A round is one syndrome cycle. " +
@@ -45,6 +47,10 @@ public static class FactoriesReport
                     ]),
             ]);
     }
+
+    private static string Needed(FactoryQuestion question) => question.ErrorAtMost is { } most
+        ? $" Listed is what is of use to the workload: a state may err with probability {Show.Probability(most)} at most, and less than a hundredth of that buys nothing."
+        : "";
 
     private static Table CatalogueTable(ImmutableArray<CatalogueEntry> entries)
     {

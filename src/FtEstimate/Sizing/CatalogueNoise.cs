@@ -10,7 +10,8 @@ namespace FtEstimate.Sizing;
 /// <param name="Law">Scaling law.</param>
 /// <param name="Strength">Noise strength per basis.</param>
 /// <param name="InjectedError">Pauli probability of an injected state.</param>
-public sealed record CatalogueNoise(IScalingLaw Law, NoiseStrength Strength, double InjectedError)
+/// <param name="ErrorAtMost">Largest output error that is of use to the workload; null: no workload stands behind the question.</param>
+public sealed record CatalogueNoise(IScalingLaw Law, NoiseStrength Strength, double InjectedError, double? ErrorAtMost = null)
 {
     /// <summary>The noise of a sized machine; where there is none, of a single patch under the quietest readout.</summary>
     public static CatalogueNoise Of(SizingResult result)
@@ -21,7 +22,10 @@ public sealed record CatalogueNoise(IScalingLaw Law, NoiseStrength Strength, dou
             ? MachineLoad.Of(machine.Atoms.Sites, machine.Distance)
             : MachineLoad.SinglePatch);
         return new CatalogueNoise(
-            space.Law, state.Strength, space.Scenario.Method.InjectedError ?? point.InjectedError(state));
+            space.Law,
+            state.Strength,
+            space.Scenario.Method.InjectedError ?? point.InjectedError(state),
+            result.Best is { Demand.TStates: > 0 } sized ? SearchLimits.Of(space.Scenario).FaultsAtMost / sized.Demand.TStates : null);
     }
 
     /// <summary>Every location at one error rate, with the textbook law, as in the literature.</summary>
@@ -29,12 +33,17 @@ public sealed record CatalogueNoise(IScalingLaw Law, NoiseStrength Strength, dou
     public static CatalogueNoise Uniform(double error) =>
         new(ScalingLaws.Textbook, PatchError.Uniform(ScalingLaws.Textbook, error), error);
 
-    /// <summary>The factories: those that improve a state and that no other beats, the whole grid, or one design held against the grid.</summary>
+    /// <summary>The factories: those of use that no other beats, the whole grid, or one design held against the grid.</summary>
     /// <param name="design">The one design; null: the grid.</param>
     /// <param name="beatenToo">Whether beaten ones are listed.</param>
     public ImmutableArray<CatalogueEntry> Entries(FactoryDesign? design, bool beatenToo)
     {
         FactoryNoise noise = new(d => PatchError.PerRound(Law, Strength, d), Math.Min(InjectedError, 0.5));
+        if (design is null && !beatenToo && ErrorAtMost is { } errorAtMost)
+        {
+            return [.. FactoryCatalogue.Undominated(noise, errorAtMost).Select(factory => new CatalogueEntry(factory, false))];
+        }
+
         ImmutableArray<CatalogueEntry> grid = FactoryCatalogue.All(noise);
         if (design is not null)
         {
