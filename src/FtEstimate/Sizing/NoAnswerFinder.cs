@@ -39,7 +39,7 @@ internal static class NoAnswerFinder
                 Obstacle.AboveThreshold, sentence, strength, factor * strength, BlameOf(MachineDetail.LedgerOf(quietest, onePatch), strength, factor * strength), null);
         }
 
-        OperatingState full = AtFullSize(space, quietest);
+        OperatingState full = quietest.At(space.AtTypicalSize);
         bool unlimitedWouldDo = WithoutGroups(space) is { } unlimited
             && Closest(unlimited, new FactoryChoice(unlimited, new FactoryCatalogue()), limits.WithoutResources()) is not null;
         double mean = full.Strength.Mean;
@@ -52,19 +52,10 @@ internal static class NoAnswerFinder
             null);
     }
 
-    /// <summary>A distance at which workloads of today's studies are run: where the growth of the round with the machine is looked at.</summary>
-    private const int TypicalDistance = 25;
-
-    private static OperatingState AtFullSize(SearchSpace space, OperatingPoint point)
-    {
-        double tiles = space.Layouts[0].Tiles;
-        return point.At(MachineLoad.Of(tiles * space.Patch.AtomsPerTile(TypicalDistance), TypicalDistance));
-    }
-
     private static string TooLarge(SearchSpace space, in OperatingState onePatch, in OperatingState full) =>
         $"No code distance up to {SearchSpace.LargestDistance} and no factory offered reaches the allowed failure probability. " +
         $"A single patch has a round of {Show.Duration(onePatch.Times.RoundSeconds)} and noise at {Show.Significant(onePatch.Strength.Mean, 2)} of the threshold; " +
-        $"with all {Show.Significant(space.Layouts[0].Tiles, 3)} tiles at distance {TypicalDistance} it is {Show.Duration(full.Times.RoundSeconds)} " +
+        $"with all {Show.Significant(space.Layouts[0].Tiles, 3)} tiles at distance {SearchSpace.TypicalDistance} it is {Show.Duration(full.Times.RoundSeconds)} " +
         $"and {Show.Significant(full.Strength.Mean, 2)}, as limits on what is served at once lengthen the round.";
 
     private const string GroupsAreTheObstacle =

@@ -37,19 +37,24 @@ public sealed record SearchSpace(
         PatchLayout patch = PatchLayout.Named(scenario.Method.Patch) ?? PatchLayout.Bare;
         RotationSynthesis synthesis = RotationSynthesis.Named(scenario.Method.Synthesis) ?? RotationSynthesis.RepeatUntilSuccess;
         bool movesAtoms = scenario.Machine.Apparatus is AtomArray { Reach: MovedAtoms };
+        ImmutableArray<LogicLayout> layouts = LogicLayout.ToTry(scenario.Workload, scenario.Method, synthesis, movesAtoms);
         return new SearchSpace(
-            scenario,
-            law,
-            patch,
-            synthesis,
-            PointsOf(scenario.Machine, law),
-            LogicLayout.ToTry(scenario.Workload, scenario.Method, synthesis, movesAtoms));
+            scenario, law, patch, synthesis, PointsOf(scenario.Machine, law, TypicalLoad(layouts, patch)), layouts);
     }
+
+    /// <summary>A distance at which studies of large algorithms arrive: where the growth of the round with the machine is looked at before it is sized.</summary>
+    public const int TypicalDistance = 25;
+
+    /// <summary>The load of the tiles of the first layout at the typical distance.</summary>
+    public MachineLoad AtTypicalSize => TypicalLoad(Layouts, Patch);
+
+    private static MachineLoad TypicalLoad(ImmutableArray<LogicLayout> layouts, PatchLayout patch) =>
+        MachineLoad.Of(layouts[0].Tiles * patch.AtomsPerTile(TypicalDistance), TypicalDistance);
 
     /// <summary>
     /// The operating points: one per exposure tried, least noise first. An exposure that another beats in round time and in noise is dropped.
     /// </summary>
-    private static ImmutableArray<OperatingPoint> PointsOf(Machine machine, IScalingLaw law)
+    private static ImmutableArray<OperatingPoint> PointsOf(Machine machine, IScalingLaw law, MachineLoad load)
     {
         if (machine.Apparatus is not AtomArray array)
         {
@@ -62,14 +67,14 @@ public sealed record SearchSpace(
         {
             var noise = new AtomNoise(array, SyndromeCycle.Of(array, array.Readout, exposure), weights);
             var point = new AtomOperatingPoint(noise, machine.Control);
-            tried.Add(new TriedPoint(point, point.At(MachineLoad.SinglePatch)));
+            tried.Add(new TriedPoint(point, point.At(load)));
         }
 
         return WorthTrying(tried);
     }
 
     /// <summary>
-    /// From the quietest point to shorter and shorter rounds: each kept point shortens the round of a single patch by at least
+    /// From the quietest point to shorter and shorter rounds: each kept point shortens the round at the typical size by at least
     /// <see cref="WorthwhileShortening"/>, and is the quietest that does. A longer round at more noise is beaten outright.
     /// </summary>
     private static ImmutableArray<OperatingPoint> WorthTrying(List<TriedPoint> tried)
@@ -90,6 +95,6 @@ public sealed record SearchSpace(
         return kept.ToImmutable();
     }
 
-    /// <summary>An operating point with what it gives a single patch.</summary>
+    /// <summary>An operating point with what it gives a machine of the typical size.</summary>
     private sealed record TriedPoint(OperatingPoint Point, OperatingState State);
 }
