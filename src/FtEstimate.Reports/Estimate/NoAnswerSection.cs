@@ -15,7 +15,7 @@ internal static class NoAnswerSection
         var blocks = ImmutableArray.CreateBuilder<Block>();
         blocks.Add(new Paragraph(
             $"No machine meets the goal: “{subject.Space.Scenario.Workload.Name}” on “{subject.Space.Scenario.Machine.Name}”.", Tone.Strong));
-        blocks.Add(new Paragraph(none.Sentence));
+        blocks.Add(new Paragraph(NoAnswerSentence.Of(subject.Space, none)));
         BottomLineSection.AddCautions(blocks, subject);
         if (none.Closest is { } closest)
         {

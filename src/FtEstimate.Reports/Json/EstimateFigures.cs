@@ -48,9 +48,20 @@ internal static class EstimateFigures
 
     private static void WriteNoAnswer(Utf8JsonWriter json, SearchSpace space, NoAnswer none)
     {
-        json.WriteString("why", none.Sentence);
+        json.WriteString("why", NoAnswerSentence.Of(space, none));
         json.WriteFinite("noise_strength", none.Strength);
         json.WriteFinite("noise_strength_needed", none.StrengthNeeded);
+        json.WriteStartArray("limits");
+        foreach (LimitInTheWay limit in none.Limits)
+        {
+            json.WriteStartObject();
+            json.WriteString("limit", NoAnswerSentence.KeyOf(limit.Resource));
+            json.WriteFinite("allowed", limit.Allowed);
+            json.WriteFinite("needed", limit.Enough);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
         json.WriteStartArray("blame");
         foreach (BlamedChannel cause in none.Blame)
         {

@@ -40,9 +40,24 @@ public sealed class NoAnswerTests
 
         Assert.All([atoms, time, supply], none => Assert.Equal(Obstacle.Limits, none.Reason));
         Assert.All([atoms, time, supply], none => Assert.NotNull(none.Closest));
-        Assert.Contains("atoms, the limit is", atoms.Sentence, StringComparison.Ordinal);
-        Assert.Contains("it takes", time.Sentence, StringComparison.Ordinal);
-        Assert.Contains("delivered", supply.Sentence, StringComparison.Ordinal);
+        Assert.Equal(LimitedResource.Atoms, Assert.Single(atoms.Limits, limit => limit.Enough is not null).Resource);
+        Assert.Equal(LimitedResource.ElapsedSeconds, Assert.Single(time.Limits, limit => limit.Enough is not null).Resource);
+        Assert.Equal(LimitedResource.AtomsPerSecond, Assert.Single(supply.Limits, limit => limit.Enough is not null).Resource);
+    }
+
+    // a thousandth above, since the search holds factories at noise rounded up
+    [Fact]
+    public void What_would_be_enough_is_enough()
+    {
+        double atoms = Enough(Easy with { Goal = Easy.Goal with { AtomsAtMost = 1000 } });
+        double seconds = Enough(Easy with { Goal = Easy.Goal with { RunSecondsAtMost = 1 } });
+        double supply = Enough(Easy with { Machine = Easy.Machine with { Supply = new Supply(1e-3, 0) } });
+
+        Assert.NotNull((Easy with { Goal = Easy.Goal with { AtomsAtMost = atoms * 1.001 } }).Answer().Best);
+        Assert.NotNull((Easy with { Goal = Easy.Goal with { RunSecondsAtMost = seconds * 1.02 } }).Answer().Best);
+        Assert.NotNull((Easy with { Machine = Easy.Machine with { Supply = new Supply(supply * 1.001, 0) } }).Answer().Best);
+
+        static double Enough(Scenario scenario) => Assert.Single(NoAnswerOf(scenario).Limits, limit => limit.Enough is not null).Enough!.Value;
     }
 
     [Fact]
