@@ -106,8 +106,8 @@ public sealed class AtomNoiseTests
         AtomNoise noise = BenchMachine.Noise(array, 0.00529);
         ErrorLedger ledger = noise.Ledger(noise.Cycle.Times(OnePatch));
 
-        Assert.Equal(0.5 * 1e-3 / 0.0278, Mean("Loss of data atoms"), 1e-4);
-        Assert.Equal(0.5 * 1e-3 / 0.0441, Mean("Loss of check atoms"), 1e-4);
+        Assert.Equal(0.5 * 2 * 1e-3 / 0.0278, Mean("Loss of data atoms"), 1e-4);
+        Assert.Equal(0.5 * 2 * 1e-3 / 0.0441, Mean("Loss of check atoms"), 1e-4);
 
         double Mean(string name) => ledger.Channels.Single(channel => channel.Name == name).Strength.Mean;
     }

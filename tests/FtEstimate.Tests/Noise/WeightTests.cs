@@ -47,12 +47,12 @@ public sealed class WeightTests
         }
     }
 
-    // half of the atoms are of each kind: data and checks lost at their threshold together make strength 1
+    // thresholds are per gate, losses per atom, and half of the atoms are of each kind: both lost at their threshold together make strength 1
     [Fact]
     public void Loss_at_its_threshold_on_both_kinds_is_strength_1()
     {
-        NoiseStrength data = LossWeights.Told(LossWeights.Threshold(16), 4);
-        NoiseStrength checks = LossWeights.Told(LossWeights.Threshold(4), 1);
+        NoiseStrength data = LossWeights.Told(LossWeights.Threshold(16) / 2, 4);
+        NoiseStrength checks = LossWeights.Told(LossWeights.Threshold(4) / 2, 1);
 
         Assert.Equal(1, (data + checks).Mean, 1e-12);
     }
