@@ -44,7 +44,7 @@ internal static class MethodSection
             LawReach reach = law.Reach(machine.Strength.Worse, machine.Distance);
             bullets.Add(new Bullet(
                 reach.Inside ? "Here it rests on data" : "Here it is extrapolated",
-                $"Distance {machine.Distance}, uniform error {Show.Probability(machine.Strength.Worse * law.Threshold)}. {reach.Sentence}"));
+                $"Distance {machine.Distance}, as strong as a uniform error of {Show.Probability(machine.Strength.Mean * law.Threshold)}. {reach.Sentence}"));
         }
 
         return bullets.ToImmutable();
@@ -69,7 +69,7 @@ internal static class MethodSection
         {
             bullets.Add(new Bullet(
                 "Weights of errors", "First order and interim: from an unpublished simulation of patches of distance 5 and 7, within 9 % in Λ on eight mixes of noise."));
-            bullets.Add(new Bullet("Loss", "Weights of told losses after Baranes 2026 (arXiv:2502.20558), first order. A loss nobody tells counts as a gate error."));
+            bullets.Add(new Bullet("Loss", "Weights of told losses after Baranes 2026 (arXiv:2502.20558), first order. A loss nobody tells counts as a gate error, and as a random qubit until the atom is replaced."));
         }
 
         bullets.Add(new Bullet("Atoms of a patch", $"{subject.Space.Patch.Name} at code distance d."));

@@ -112,7 +112,7 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
             return;
         }
 
-        double tiles = bare.Layout.Tiles + (factories.CountsAsTiles ? TileFactory.Tiles * count : 0);
+        double tiles = factories.TilesThatCount(bare.Layout, count);
         double perRound = PatchError.PerRound(space.Law, state.Strength * bare.Layout.NoiseFactor, bare.Distance);
         if (CoarsestRotations(pacing, demand, tiles, perRound, factory?.OutputError ?? 0) is { } found
             && KeepsElapsed(found.Clock.RunSeconds, found.Failure.Total))
@@ -128,10 +128,7 @@ internal sealed class CandidateTrial(SearchSpace space, FactoryChoice factories,
         while (true)
         {
             RunClock clock = pacing.Clock(demand);
-            FailureBudget failure = new(
-                FailureComposition.ExpectedFaults(tiles * clock.Rounds, errorPerRound),
-                FailureComposition.ExpectedFaults(demand.TStates, errorPerState),
-                demand.SynthesisFailure);
+            FailureBudget failure = FailureBudget.Of(tiles, clock, errorPerRound, demand, errorPerState);
             if (failure.Meets(limits.FailureAtMost, limits.Each))
             {
                 return new MetGoal(clock, failure, demand.RotationError);

@@ -16,6 +16,9 @@ internal sealed class FactoryChoice(SearchSpace space, FactoryCatalogue catalogu
     /// <summary>Whether factories are tiles of the data distance, whose logical errors count with those of all tiles.</summary>
     public bool CountsAsTiles => space.Scenario.Method.Factory == TileFactory.ScenarioName;
 
+    /// <summary>Tiles whose logical errors count towards the failure: those of the layout, and of tile factories.</summary>
+    public double TilesThatCount(LogicLayout layout, int factoryCount) => layout.Tiles + (CountsAsTiles ? TileFactory.Tiles * factoryCount : 0);
+
     /// <summary>Factories at the noise rounded up to the catalogue's grid, so that neighbouring sizes share an evaluation.</summary>
     /// <param name="point">Readout and exposure.</param>
     /// <param name="state">Times and noise.</param>

@@ -17,4 +17,15 @@ public readonly record struct FailureBudget(double Patches, double MagicStates, 
     public bool Meets(double allowed, bool each) => each
         ? FailureComposition.OfExpected(Math.Max(Patches, Math.Max(MagicStates, Synthesis))) <= allowed
         : Total <= allowed;
+
+    /// <summary>The budget of one machine.</summary>
+    /// <param name="tiles">Tiles whose logical errors count.</param>
+    /// <param name="clock">Its clock.</param>
+    /// <param name="errorPerRound">Any logical error of one tile in one round.</param>
+    /// <param name="demand">Magic states and rotations.</param>
+    /// <param name="errorPerState">Error of one magic state.</param>
+    public static FailureBudget Of(double tiles, in RunClock clock, double errorPerRound, in TStateDemand demand, double errorPerState) => new(
+        FailureComposition.ExpectedFaults(tiles * clock.Rounds, errorPerRound),
+        FailureComposition.ExpectedFaults(demand.TStates, errorPerState),
+        demand.SynthesisFailure);
 }

@@ -2,7 +2,6 @@ using System.Collections.Immutable;
 using FtEstimate.Cycles;
 using FtEstimate.MagicStates;
 using FtEstimate.Noise;
-using FtEstimate.Quantities;
 using FtEstimate.Scenarios;
 using FtEstimate.SurfaceCode;
 
@@ -30,11 +29,8 @@ internal sealed class MachineDetail(SearchSpace space, FactoryChoice factories)
         double reaction = candidate.Point.ReactionSeconds(distance);
         RunClock clock = RunClock.Of(
             layout, demand, distance, state.Times.RoundSeconds, reaction, factory is null ? 0 : factory.RoundsPerOutput / candidate.FactoryCount, factory?.RoundsPerBatch ?? 0);
-        double tiles = layout.Tiles + (factories.CountsAsTiles ? TileFactory.Tiles * candidate.FactoryCount : 0);
-        FailureBudget failure = new(
-            FailureComposition.ExpectedFaults(tiles * clock.Rounds, perRound),
-            FailureComposition.ExpectedFaults(demand.TStates, factory?.OutputError ?? 0),
-            demand.SynthesisFailure);
+        FailureBudget failure = FailureBudget.Of(
+            factories.TilesThatCount(layout, candidate.FactoryCount), clock, perRound, demand, factory?.OutputError ?? 0);
         AtomCount atoms = AtomCount.Of(tileAtoms, factoryAtoms, candidate.Point, scenario.Machine.Supply.SpareFraction);
         return new SizedMachine(
             layout,
