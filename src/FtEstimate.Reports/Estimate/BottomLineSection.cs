@@ -24,8 +24,11 @@ internal static class BottomLineSection
         blocks.Add(FigureTable.Of(AnswerFigures.Of(subject.Space, machine), withMeaning: true));
         blocks.Add(new Paragraph("What limits it:"));
         blocks.Add(new BulletList(Limits(subject, machine)));
+        string reach = subject.Space.Law.Reach(machine.Strength.Worse, machine.Distance).Inside
+            ? ""
+            : $" The law from physical to logical errors is carried beyond its data at distance {machine.Distance}; see Method and limits.";
         blocks.Add(new Paragraph(
-            "This is a planning estimate, not a forecast. How far the ranges of the inputs move it is not worked out yet; see How sure."));
+            $"This is a planning estimate, not a forecast.{reach} How far the ranges of the inputs move it is not worked out yet; see How sure."));
         return new ReportSection(Title, blocks.ToImmutable());
     }
 
