@@ -50,9 +50,10 @@ public sealed class RoomOrderTests
 
     [Theory]
     [InlineData("FtEstimate")]
-    [InlineData("FtEstimate.Files", "FtEstimate")]
-    [InlineData("FtEstimate.Reports", "FtEstimate")]
-    [InlineData("FtEstimate.Cli", "FtEstimate", "FtEstimate.Files", "FtEstimate.Reports")]
+    [InlineData("FtEstimate.Simulation", "FtEstimate")]
+    [InlineData("FtEstimate.Files", "FtEstimate", "FtEstimate.Simulation")]
+    [InlineData("FtEstimate.Reports", "FtEstimate", "FtEstimate.Simulation")]
+    [InlineData("FtEstimate.Cli", "FtEstimate", "FtEstimate.Simulation", "FtEstimate.Files", "FtEstimate.Reports")]
     public void A_project_refers_only_to_projects_below_it(string project, params string[] expected)
     {
         XDocument file = XDocument.Load(RepositoryFiles.At("src", project, project + ".csproj"));
