@@ -70,7 +70,7 @@ public static class FaultPropagation
                 }
             }
 
-            losses = new LossBook(circuit.AtomCount, mechanisms);
+            losses = new LossBook(circuit, mechanisms);
         }
 
         public void Back(in Operation operation)

@@ -1,15 +1,20 @@
 using System.Collections.Immutable;
+using FtEstimate.Simulation.Circuits;
 
 namespace FtEstimate.Simulation.Graphs;
 
 /// <summary>Cuts the lives of the atoms into windows between two looks while a circuit is walked backwards.</summary>
-/// <param name="atomCount">Number of atoms.</param>
+/// <param name="circuit">The circuit.</param>
 /// <param name="mechanisms">The mechanisms of the circuit.</param>
-internal sealed class LossBook(int atomCount, MechanismTable mechanisms)
+internal sealed class LossBook(Circuit circuit, MechanismTable mechanisms)
 {
-    private readonly List<LossStep>?[] open = new List<LossStep>?[atomCount];
-    private readonly bool[] told = new bool[atomCount];
+    private const int NoLook = -1;
+
+    private readonly List<LossStep>?[] open = new List<LossStep>?[circuit.AtomCount];
+    private readonly bool[] told = new bool[circuit.AtomCount];
+    private readonly int[] look = [.. Enumerable.Repeat(NoLook, circuit.AtomCount)];
     private readonly List<LossWindow> windows = [];
+    private int looks = circuit.Operations.Count(operation => operation.Kind is OperationKind.ReplaceTold or OperationKind.ReplaceUntold);
 
     /// <summary>An instant at which an atom may be lost or a lost one gets a fresh Pauli.</summary>
     public void Step(int atom, double lossProbability, Symptom seen) =>
@@ -20,6 +25,7 @@ internal sealed class LossBook(int atomCount, MechanismTable mechanisms)
     {
         CloseWindow(atom);
         told[atom] = isTold;
+        look[atom] = --looks;
     }
 
     /// <summary>All windows, earliest last look first.</summary>
@@ -60,7 +66,7 @@ internal sealed class LossBook(int atomCount, MechanismTable mechanisms)
         if (open[atom] is { } steps)
         {
             steps.Reverse();
-            LossWindow window = new(told[atom], [.. steps], []);
+            LossWindow window = new(look[atom], told[atom], [.. steps], []);
             if (window.LossProbability > 0 && steps.Exists(step => step.Edge >= 0))
             {
                 windows.Add(window with { Consequences = ConsequencesOf(steps, window.LossProbability) });
@@ -69,6 +75,7 @@ internal sealed class LossBook(int atomCount, MechanismTable mechanisms)
 
         open[atom] = null;
         told[atom] = false;
+        look[atom] = NoLook;
     }
 
     /// <summary>A mechanism is flipped with probability one half if the loss came before one of its draws, whatever else is drawn.</summary>

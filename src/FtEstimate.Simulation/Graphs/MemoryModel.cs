@@ -10,10 +10,11 @@ public sealed record MemoryModel(
     DetectorGraph Graph, ImmutableArray<double> PauliProbabilities, ImmutableArray<LossWindow> Windows);
 
 /// <summary>One atom from a replacement to the next look.</summary>
+/// <param name="Look">Number of the look that ends it, counted through the circuit; −1 where the circuit ends first.</param>
 /// <param name="Told">Whether the decoder learns at the end that the atom was lost.</param>
 /// <param name="Steps">In order of time.</param>
 /// <param name="Consequences">Each mechanism that the loss may flip, with its probability given a loss in this window; no mechanism twice.</param>
-public sealed record LossWindow(bool Told, ImmutableArray<LossStep> Steps, ImmutableArray<LossConsequence> Consequences)
+public sealed record LossWindow(int Look, bool Told, ImmutableArray<LossStep> Steps, ImmutableArray<LossConsequence> Consequences)
 {
     /// <summary>Probability that the atom is lost in this window.</summary>
     public double LossProbability
