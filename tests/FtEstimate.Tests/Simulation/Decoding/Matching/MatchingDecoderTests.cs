@@ -1,11 +1,14 @@
 using CsCheck;
+using FtEstimate.Simulation.Decoding;
 using FtEstimate.Simulation.Decoding.Matching;
+using FtEstimate.Simulation.Graphs;
+using FtEstimate.Simulation.Sampling;
 
 namespace FtEstimate.Tests.Simulation.Decoding.Matching;
 
 public sealed class MatchingDecoderTests
 {
-    private const int Boundary = -1;
+    private const int Boundary = DetectorGraph.Boundary;
 
     [Fact]
     public void The_weight_is_the_least_of_all_pairings() => Gen.ULong.Sample(
@@ -19,6 +22,81 @@ public sealed class MatchingDecoderTests
     [Fact]
     public void The_radii_prove_the_matching_of_hundreds_of_defects() => Gen.ULong.Sample(
         seed => AssertProvenByRadii(DecodingCase.Of(seed, 500, 250)), iter: Iterations(60));
+
+    [Fact]
+    public void The_radii_prove_the_matching_of_a_code_over_rounds() => Gen.ULong.Sample(
+        seed => AssertProvenByRadii(LayeredCase(seed)), iter: Iterations(20));
+
+    [Fact]
+    public void An_isolated_pair_is_matched_along_the_cheapest_path()
+    {
+        DetectorGraph graph = new(3, [Edge(0, 1, 0.01), Edge(0, 2, 0.2, true), Edge(2, 1, 0.2), Edge(0, Boundary, 0.001), Edge(1, Boundary, 0.001)]);
+
+        // ln 99 = 4.6 against 2 ln 4 = 2.8
+        Assert.True(new MatchingDecoder(graph).Decode([0, 1], []));
+    }
+
+    [Fact]
+    public void Of_two_mechanisms_with_the_same_defects_the_likelier_one_is_answered()
+    {
+        DetectorGraph graph = new(2, [Edge(0, 1, 0.01), Edge(0, 1, 0.011, true)]);
+
+        Assert.True(new MatchingDecoder(graph).Decode([0, 1], []));
+        Assert.False(new MatchingDecoder(graph).Decode([0, 1], [new ToldEdge(0, 0)]));
+    }
+
+    [Fact]
+    public void A_defect_is_matched_over_an_edge_that_cannot_happen_if_there_is_no_other()
+    {
+        DetectorGraph graph = new(2, [Edge(0, 1, 0), Edge(1, Boundary, 0, true)]);
+
+        Assert.True(new MatchingDecoder(graph).Decode([0], []));
+        Assert.False(new MatchingDecoder(graph).Decode([0, 1], []));
+    }
+
+    [Fact]
+    public void No_defects_mean_no_flip() => Assert.False(new MatchingDecoder(RotatedCode.WithPerfectChecks(3, 0.1)).Decode([], []));
+
+    // an odd number on a ring without boundary: two are matched, one stays alone
+    [Fact]
+    public void A_defect_without_partner_and_boundary_stays_alone()
+    {
+        DetectorGraph graph = new(5, [Edge(0, 1, 0.1), Edge(1, 2, 0.1), Edge(2, 0, 0.1), Edge(3, 4, 0.1, true), Edge(4, Boundary, 0.1)]);
+        MatchingDecoder decoder = new(graph);
+
+        Assert.True(decoder.Decode([0, 1, 2, 3], []));
+        Assert.Equal(2, decoder.LastPaths.Length);
+    }
+
+    private static GraphEdge Edge(int a, int b, double probability, bool flips = false) => new(a, b, probability, flips);
+
+    private static DecodingCase LayeredCase(ulong seed)
+    {
+        RandomBits random = new(seed, 0);
+        DetectorGraph graph = RotatedCode.WithLayers(9, 6, 0.02);
+        bool[] fired = new bool[graph.VertexCount];
+        List<ToldEdge> told = [];
+        for (int index = 0; index < graph.Edges.Length; index++)
+        {
+            bool isErased = random.NextBelow(20) == 0;
+            GraphEdge edge = graph.Edges[index];
+            if (isErased)
+            {
+                told.Add(new ToldEdge(index, 0));
+            }
+
+            if (random.NextUnit() < (isErased ? 0.5 : edge.Probability))
+            {
+                fired[edge.A] ^= true;
+                if (!edge.MeetsBoundary)
+                {
+                    fired[edge.B] ^= true;
+                }
+            }
+        }
+
+        return new DecodingCase(graph, [.. Enumerable.Range(0, fired.Length).Where(vertex => fired[vertex])], [.. told]);
+    }
 
     private static int Iterations(int count) =>
         int.Parse(Environment.GetEnvironmentVariable("MATCHING_FACTOR") ?? "1", System.Globalization.CultureInfo.InvariantCulture) * count;
