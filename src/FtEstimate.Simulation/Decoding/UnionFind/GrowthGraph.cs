@@ -1,0 +1,150 @@
+using FtEstimate.Simulation.Graphs;
+
+namespace FtEstimate.Simulation.Decoding.UnionFind;
+
+/// <summary>A detector graph packed for growth: the edges of a vertex side by side, with whole-number lengths.</summary>
+/// <remarks>
+/// Lengths are weights in steps of 1/1024, so that an ordinary weight of about 7 is good to 10⁻⁴: sums of whole numbers are the same in any order,
+/// and ties are ties. The boundary is one more vertex behind the last, with no edges of its own.
+/// </remarks>
+internal sealed class GrowthGraph
+{
+    /// <summary>Stands for no edge, no event.</summary>
+    public const int Never = int.MaxValue;
+
+    private const double StepsPerUnit = 1024;
+
+    // keeps a walk over thousands of the heaviest edges below the largest int
+    private const int LongestLength = 1 << 17;
+
+    private readonly int[] placeAtA;
+    private readonly int[] placeAtB;
+
+    /// <summary>Packs a graph.</summary>
+    public GrowthGraph(DetectorGraph graph)
+    {
+        int vertices = graph.VertexCount;
+        BoundaryVertex = vertices;
+        placeAtA = new int[graph.Edges.Length];
+        placeAtB = new int[graph.Edges.Length];
+        First = new int[vertices + 1];
+        for (int vertex = 0; vertex < vertices; vertex++)
+        {
+            First[vertex + 1] = First[vertex] + graph.EdgesAt(vertex).Length;
+        }
+
+        HalfEdges = new HalfEdge[First[vertices]];
+        Array.Fill(placeAtB, -1);
+        for (int vertex = 0; vertex < vertices; vertex++)
+        {
+            ReadOnlySpan<int> edges = graph.EdgesAt(vertex);
+            for (int i = 0; i < edges.Length; i++)
+            {
+                GraphEdge edge = graph.Edges[edges[i]];
+                int place = First[vertex] + i;
+                (edge.A == vertex ? placeAtA : placeAtB)[edges[i]] = place;
+                int other = edge.MeetsBoundary ? BoundaryVertex : edge.Other(vertex);
+                HalfEdges[place] = new HalfEdge(other, edge.FlipsObservable, LengthOf(DetectorGraph.WeightOf(edge.Probability)));
+            }
+        }
+
+        Surroundings = SurroundingsOf();
+    }
+
+    /// <summary>The number that stands for the boundary.</summary>
+    public int BoundaryVertex { get; }
+
+    /// <summary>Where the edges of each vertex begin in <see cref="HalfEdges"/>; one more entry than vertices.</summary>
+    public int[] First { get; }
+
+    /// <summary>Edges as seen from each of their ends.</summary>
+    public HalfEdge[] HalfEdges { get; }
+
+    /// <summary>How near the next things are, for each vertex.</summary>
+    public Surroundings[] Surroundings { get; }
+
+    /// <summary>Gives an edge another weight for a while.</summary>
+    /// <param name="edge">Index of the edge.</param>
+    /// <param name="weight">The weight, 0 or more.</param>
+    /// <returns>The length it had.</returns>
+    public int Replace(int edge, double weight) => ReplaceLength(edge, LengthOf(weight));
+
+    /// <summary>Gives an edge another length.</summary>
+    /// <returns>The length it had.</returns>
+    public int ReplaceLength(int edge, int length)
+    {
+        ref HalfEdge there = ref HalfEdges[placeAtA[edge]];
+        int before = there.Length;
+        there.Length = length;
+        if (placeAtB[edge] >= 0)
+        {
+            HalfEdges[placeAtB[edge]].Length = length;
+        }
+
+        return before;
+    }
+
+    private static int LengthOf(double weight) => (int)Math.Round(Math.Clamp(weight * StepsPerUnit, 0, LongestLength));
+
+    private Surroundings[] SurroundingsOf()
+    {
+        int[] shortest = new int[BoundaryVertex];
+        for (int vertex = 0; vertex < BoundaryVertex; vertex++)
+        {
+            shortest[vertex] = Never;
+            foreach (HalfEdge edge in HalfEdges.AsSpan(First[vertex]..First[vertex + 1]))
+            {
+                if (edge.Other != BoundaryVertex)
+                {
+                    shortest[vertex] = Math.Min(shortest[vertex], edge.Length);
+                }
+            }
+        }
+
+        var surroundings = new Surroundings[BoundaryVertex];
+        for (int vertex = 0; vertex < BoundaryVertex; vertex++)
+        {
+            int twoSteps = Never;
+            int boundary = Never;
+            bool flips = false;
+            foreach (HalfEdge edge in HalfEdges.AsSpan(First[vertex]..First[vertex + 1]))
+            {
+                if (edge.Other != BoundaryVertex)
+                {
+                    twoSteps = Math.Min(twoSteps, edge.Length + shortest[edge.Other]);
+                }
+                else if (edge.Length < boundary)
+                {
+                    (boundary, flips) = (edge.Length, edge.FlipsObservable == 1);
+                }
+            }
+
+            int twiceBoundary = boundary == Never ? Never : 2 * boundary;
+            surroundings[vertex] = new Surroundings(
+                Math.Min(twoSteps, twiceBoundary), twiceBoundary <= twoSteps ? twiceBoundary : Never, flips);
+        }
+
+        return surroundings;
+    }
+}
+
+/// <summary>An edge as seen from one end.</summary>
+internal struct HalfEdge(int other, bool flipsObservable, int length)
+{
+    private readonly int packed = (other << 1) | (flipsObservable ? 1 : 0);
+
+    /// <summary>Length in steps.</summary>
+    public int Length = length;
+
+    /// <summary>The other end.</summary>
+    public readonly int Other => packed >> 1;
+
+    /// <summary>1 if the observable is flipped.</summary>
+    public readonly int FlipsObservable => packed & 1;
+}
+
+/// <summary>What can happen to a growing vertex, and how early.</summary>
+/// <param name="QuietDiameter">Twice the radius up to which nothing can meet it but a neighbour that grows: neither the boundary nor anything two edges away.</param>
+/// <param name="BoundaryDiameter">Twice the distance of the boundary by one edge if nothing two edges away can be met before, else <see cref="GrowthGraph.Never"/>.</param>
+/// <param name="BoundaryFlips">Whether the shortest edge to the boundary flips the observable.</param>
+internal readonly record struct Surroundings(int QuietDiameter, int BoundaryDiameter, bool BoundaryFlips);
