@@ -44,7 +44,6 @@ internal sealed class GrowthGraph
         }
 
         HalfEdges = [.. halfEdges];
-        Surroundings = SurroundingsOf();
         Later = new LaterNeighbours(this);
     }
 
@@ -56,9 +55,6 @@ internal sealed class GrowthGraph
 
     /// <summary>Edges as seen from each of their ends: those to the boundary, shortest first, then by number of the other end.</summary>
     public HalfEdge[] HalfEdges { get; }
-
-    /// <summary>How near the next things are, for each vertex.</summary>
-    public Surroundings[] Surroundings { get; }
 
     /// <summary>The neighbours with larger numbers.</summary>
     public LaterNeighbours Later { get; }
@@ -84,13 +80,8 @@ internal sealed class GrowthGraph
         return before;
     }
 
-    private static IEnumerable<int> InOrder(DetectorGraph graph, int vertex) => graph.EdgesAt(vertex).ToArray()
-        .OrderBy(index => graph.Edges[index].Other(vertex))
-        .ThenByDescending(index => graph.Edges[index].Probability);
-
-    private static int LengthOf(double weight) => (int)Math.Round(Math.Clamp(weight * StepsPerUnit, 0, LongestLength));
-
-    private Surroundings[] SurroundingsOf()
+    /// <summary>How near the next things are to a defect, for each vertex.</summary>
+    public DefectSite[] DefectSites()
     {
         int[] shortest = new int[BoundaryVertex];
         for (int vertex = 0; vertex < BoundaryVertex; vertex++)
@@ -105,7 +96,7 @@ internal sealed class GrowthGraph
             }
         }
 
-        var surroundings = new Surroundings[BoundaryVertex];
+        var sites = new DefectSite[BoundaryVertex];
         for (int vertex = 0; vertex < BoundaryVertex; vertex++)
         {
             int twoSteps = Never;
@@ -123,32 +114,15 @@ internal sealed class GrowthGraph
             }
 
             int twiceBoundary = boundary == Never ? Never : 2 * boundary;
-            surroundings[vertex] = new Surroundings(Math.Min(twoSteps, twiceBoundary), twiceBoundary <= twoSteps ? twiceBoundary : Never);
+            sites[vertex] = new DefectSite(Math.Min(twoSteps, twiceBoundary), twiceBoundary <= twoSteps ? twiceBoundary : Never);
         }
 
-        return surroundings;
+        return sites;
     }
+
+    private static IEnumerable<int> InOrder(DetectorGraph graph, int vertex) => graph.EdgesAt(vertex).ToArray()
+        .OrderBy(index => graph.Edges[index].Other(vertex))
+        .ThenByDescending(index => graph.Edges[index].Probability);
+
+    private static int LengthOf(double weight) => (int)Math.Round(Math.Clamp(weight * StepsPerUnit, 0, LongestLength));
 }
-
-/// <summary>An edge as seen from one end.</summary>
-internal struct HalfEdge(int other, bool flipsObservable, int length)
-{
-    private readonly int packed = (other << 1) | (flipsObservable ? 1 : 0);
-
-    /// <summary>Length in steps.</summary>
-    public int Length = length;
-
-    /// <summary>The other end.</summary>
-    public readonly int Other => packed >> 1;
-
-    /// <summary>1 if the observable is flipped.</summary>
-    public readonly int FlipsObservable => packed & 1;
-
-    /// <summary>The same edge with another other end.</summary>
-    public readonly HalfEdge To(int other) => new(other, FlipsObservable != 0, Length);
-}
-
-/// <summary>What can happen to a growing vertex, and how early.</summary>
-/// <param name="QuietDiameter">Twice the radius up to which nothing can meet it but a neighbour that grows: neither the boundary nor anything two edges away.</param>
-/// <param name="BoundaryDiameter">Twice the distance of the boundary by one edge if nothing two edges away can be met before, else <see cref="GrowthGraph.Never"/>.</param>
-internal readonly record struct Surroundings(int QuietDiameter, int BoundaryDiameter);

@@ -1,3 +1,4 @@
+using System.Numerics;
 using FtEstimate.Simulation.Graphs;
 
 namespace FtEstimate.Simulation.Decoding.UnionFind;
@@ -20,7 +21,7 @@ public sealed class UnionFindDecoder : IDecoder
     // which vertices fired, and which have a told edge
     private readonly byte[] fired;
     private readonly byte[] beside;
-    private readonly HalfEdge[] nearest;
+    private readonly DefectSite[] sites;
     private readonly int[] unsettled;
     private int[] replaced = new int[64];
 
@@ -33,7 +34,7 @@ public sealed class UnionFindDecoder : IDecoder
         growth = new ClusterGrowth(this.graph);
         fired = new byte[graph.VertexCount + 1];
         beside = new byte[graph.VertexCount + 1];
-        nearest = new HalfEdge[graph.VertexCount];
+        sites = this.graph.DefectSites();
         unsettled = new int[graph.VertexCount];
     }
 
@@ -50,15 +51,12 @@ public sealed class UnionFindDecoder : IDecoder
         foreach (int vertex in defects)
         {
             fired[vertex] = 1;
-            nearest[vertex] = nobody;
+            sites[vertex].Nearest = nobody;
         }
 
         foreach (int vertex in defects)
         {
-            if (graph.Later.AnyMarked(vertex, fired))
-            {
-                MeetLater(vertex);
-            }
+            MeetLater(vertex);
         }
 
         int count = 0;
@@ -93,14 +91,17 @@ public sealed class UnionFindDecoder : IDecoder
     // neighbours that fired learn of each other
     private void MeetLater(int vertex)
     {
-        int end = graph.First[vertex + 1];
-        for (int place = graph.Later.FirstEdge[vertex]; place < end; place++)
+        LaterNeighbours later = graph.Later;
+        for (int from = 0; from < later.RowLength; from += LaterNeighbours.Chunk)
         {
-            HalfEdge edge = graph.HalfEdges[place];
-            if (fired[edge.Other] != 0)
+            for (int marked = later.MarkedAmongEight(vertex, from, fired); marked != 0; marked &= marked - 1)
             {
-                nearest[vertex] = Nearer(nearest[vertex], edge);
-                nearest[edge.Other] = Nearer(nearest[edge.Other], edge.To(vertex));
+                int place = later.FirstEdge(vertex) + from + BitOperations.TrailingZeroCount(marked) - 1;
+                HalfEdge edge = graph.HalfEdges[place];
+                ref DefectSite here = ref sites[vertex];
+                ref DefectSite there = ref sites[edge.Other];
+                here.Nearest = Nearer(here.Nearest, edge);
+                there.Nearest = Nearer(there.Nearest, edge.To(vertex));
             }
         }
     }
@@ -112,8 +113,8 @@ public sealed class UnionFindDecoder : IDecoder
     // the surroundings know.
     private bool TrySettle(int vertex, bool anyTold)
     {
-        HalfEdge near = nearest[vertex];
-        ref readonly Surroundings around = ref graph.Surroundings[vertex];
+        ref readonly DefectSite around = ref sites[vertex];
+        HalfEdge near = around.Nearest;
         if (near.Length > around.BoundaryDiameter)
         {
             if (anyTold && IsNearTold(vertex))
@@ -126,8 +127,8 @@ public sealed class UnionFindDecoder : IDecoder
         }
 
         int other = near.Other;
-        if (other == graph.BoundaryVertex || nearest[other].Other != vertex
-            || near.Length > Math.Min(around.QuietDiameter, graph.Surroundings[other].QuietDiameter)
+        if (other == graph.BoundaryVertex || sites[other].Nearest.Other != vertex
+            || near.Length > Math.Min(around.QuietDiameter, sites[other].QuietDiameter)
             || (anyTold && (IsNearTold(vertex) || IsNearTold(other))))
         {
             return false;
