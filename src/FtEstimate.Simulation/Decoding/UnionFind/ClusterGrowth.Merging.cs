@@ -95,7 +95,8 @@ internal sealed partial class ClusterGrowth
         ref ClusterVertex joining = ref vertices[other];
         number.Bits.Sum ^= (byte)(joining.Bits.Sum ^ (joining.Bits.Odd & flip));
         number.Bits.Odd ^= joining.Bits.Odd;
-        if (number.Bits.Exit == 0 && joining.Bits.Exit != 0)
+        // never both: one of the two was growing
+        if (joining.Bits.Exit != 0)
         {
             number.Bits.Exit = (byte)(joining.Bits.Exit ^ flip);
         }
