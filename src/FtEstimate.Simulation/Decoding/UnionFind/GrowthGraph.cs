@@ -23,32 +23,28 @@ internal sealed class GrowthGraph
     /// <summary>Packs a graph.</summary>
     public GrowthGraph(DetectorGraph graph)
     {
-        int vertices = graph.VertexCount;
-        BoundaryVertex = vertices;
+        int vertexCount = graph.VertexCount;
+        BoundaryVertex = vertexCount;
         placeAtA = new int[graph.Edges.Length];
         placeAtB = new int[graph.Edges.Length];
-        First = new int[vertices + 1];
-        for (int vertex = 0; vertex < vertices; vertex++)
-        {
-            First[vertex + 1] = First[vertex] + graph.EdgesAt(vertex).Length;
-        }
-
-        HalfEdges = new HalfEdge[First[vertices]];
         Array.Fill(placeAtB, -1);
-        for (int vertex = 0; vertex < vertices; vertex++)
+        First = new int[vertexCount + 1];
+        var halfEdges = new List<HalfEdge>(2 * graph.Edges.Length);
+        for (int vertex = 0; vertex < vertexCount; vertex++)
         {
-            ReadOnlySpan<int> edges = graph.EdgesAt(vertex);
-            for (int i = 0; i < edges.Length; i++)
+            foreach (int index in InOrder(graph, vertex))
             {
-                GraphEdge edge = graph.Edges[edges[i]];
-                int place = First[vertex] + i;
-                (edge.A == vertex ? placeAtA : placeAtB)[edges[i]] = place;
+                GraphEdge edge = graph.Edges[index];
+                (edge.A == vertex ? placeAtA : placeAtB)[index] = halfEdges.Count;
                 int other = edge.MeetsBoundary ? BoundaryVertex : edge.Other(vertex);
-                HalfEdges[place] = new HalfEdge(other, edge.FlipsObservable, LengthOf(DetectorGraph.WeightOf(edge.Probability)));
+                halfEdges.Add(new HalfEdge(other, edge.FlipsObservable, LengthOf(DetectorGraph.WeightOf(edge.Probability))));
             }
+
+            First[vertex + 1] = halfEdges.Count;
         }
 
-        Surroundings = SurroundingsOf();
+        HalfEdges = [.. halfEdges];
+        Later = new LaterNeighbours(this);
     }
 
     /// <summary>The number that stands for the boundary.</summary>
@@ -57,11 +53,11 @@ internal sealed class GrowthGraph
     /// <summary>Where the edges of each vertex begin in <see cref="HalfEdges"/>; one more entry than vertices.</summary>
     public int[] First { get; }
 
-    /// <summary>Edges as seen from each of their ends.</summary>
+    /// <summary>Edges as seen from each of their ends: those to the boundary, shortest first, then by number of the other end.</summary>
     public HalfEdge[] HalfEdges { get; }
 
-    /// <summary>How near the next things are, for each vertex.</summary>
-    public Surroundings[] Surroundings { get; }
+    /// <summary>The neighbours with larger numbers.</summary>
+    public LaterNeighbours Later { get; }
 
     /// <summary>Gives an edge another weight for a while.</summary>
     /// <param name="edge">Index of the edge.</param>
@@ -84,9 +80,8 @@ internal sealed class GrowthGraph
         return before;
     }
 
-    private static int LengthOf(double weight) => (int)Math.Round(Math.Clamp(weight * StepsPerUnit, 0, LongestLength));
-
-    private Surroundings[] SurroundingsOf()
+    /// <summary>How near the next things are to a defect, for each vertex.</summary>
+    public DefectSite[] DefectSites()
     {
         int[] shortest = new int[BoundaryVertex];
         for (int vertex = 0; vertex < BoundaryVertex; vertex++)
@@ -101,50 +96,33 @@ internal sealed class GrowthGraph
             }
         }
 
-        var surroundings = new Surroundings[BoundaryVertex];
+        var sites = new DefectSite[BoundaryVertex];
         for (int vertex = 0; vertex < BoundaryVertex; vertex++)
         {
             int twoSteps = Never;
             int boundary = Never;
-            bool flips = false;
             foreach (HalfEdge edge in HalfEdges.AsSpan(First[vertex]..First[vertex + 1]))
             {
                 if (edge.Other != BoundaryVertex)
                 {
                     twoSteps = Math.Min(twoSteps, edge.Length + shortest[edge.Other]);
                 }
-                else if (edge.Length < boundary)
+                else
                 {
-                    (boundary, flips) = (edge.Length, edge.FlipsObservable == 1);
+                    boundary = Math.Min(boundary, edge.Length);
                 }
             }
 
             int twiceBoundary = boundary == Never ? Never : 2 * boundary;
-            surroundings[vertex] = new Surroundings(
-                Math.Min(twoSteps, twiceBoundary), twiceBoundary <= twoSteps ? twiceBoundary : Never, flips);
+            sites[vertex] = new DefectSite(Math.Min(twoSteps, twiceBoundary), twiceBoundary <= twoSteps ? twiceBoundary : Never);
         }
 
-        return surroundings;
+        return sites;
     }
+
+    private static IEnumerable<int> InOrder(DetectorGraph graph, int vertex) => graph.EdgesAt(vertex).ToArray()
+        .OrderBy(index => graph.Edges[index].Other(vertex))
+        .ThenByDescending(index => graph.Edges[index].Probability);
+
+    private static int LengthOf(double weight) => (int)Math.Round(Math.Clamp(weight * StepsPerUnit, 0, LongestLength));
 }
-
-/// <summary>An edge as seen from one end.</summary>
-internal struct HalfEdge(int other, bool flipsObservable, int length)
-{
-    private readonly int packed = (other << 1) | (flipsObservable ? 1 : 0);
-
-    /// <summary>Length in steps.</summary>
-    public int Length = length;
-
-    /// <summary>The other end.</summary>
-    public readonly int Other => packed >> 1;
-
-    /// <summary>1 if the observable is flipped.</summary>
-    public readonly int FlipsObservable => packed & 1;
-}
-
-/// <summary>What can happen to a growing vertex, and how early.</summary>
-/// <param name="QuietDiameter">Twice the radius up to which nothing can meet it but a neighbour that grows: neither the boundary nor anything two edges away.</param>
-/// <param name="BoundaryDiameter">Twice the distance of the boundary by one edge if nothing two edges away can be met before, else <see cref="GrowthGraph.Never"/>.</param>
-/// <param name="BoundaryFlips">Whether the shortest edge to the boundary flips the observable.</param>
-internal readonly record struct Surroundings(int QuietDiameter, int BoundaryDiameter, bool BoundaryFlips);

@@ -1,3 +1,4 @@
+using System.Numerics;
 using FtEstimate.Simulation.Graphs;
 
 namespace FtEstimate.Simulation.Decoding.UnionFind;
@@ -13,17 +14,14 @@ namespace FtEstimate.Simulation.Decoding.UnionFind;
 /// </remarks>
 public sealed class UnionFindDecoder : IDecoder
 {
-    private const byte Quiet = 0;
-    private const byte Fired = 1;
-    private const byte Told = 2;
-
     private readonly GrowthGraph graph;
     private readonly DetectorGraph detectors;
     private readonly ClusterGrowth growth;
 
-    // what is special about a vertex in this shot
-    private readonly byte[] marks;
-    private readonly Nearest[] nearest;
+    // which vertices fired, and which have a told edge
+    private readonly byte[] fired;
+    private readonly byte[] beside;
+    private readonly DefectSite[] sites;
     private readonly int[] unsettled;
     private int[] replaced = new int[64];
 
@@ -34,8 +32,9 @@ public sealed class UnionFindDecoder : IDecoder
         detectors = graph;
         this.graph = new GrowthGraph(graph);
         growth = new ClusterGrowth(this.graph);
-        marks = new byte[graph.VertexCount + 1];
-        nearest = new Nearest[graph.VertexCount];
+        fired = new byte[graph.VertexCount + 1];
+        beside = new byte[graph.VertexCount + 1];
+        sites = this.graph.DefectSites();
         unsettled = new int[graph.VertexCount];
     }
 
@@ -48,20 +47,22 @@ public sealed class UnionFindDecoder : IDecoder
         }
 
         Replace(told);
+        var nobody = new HalfEdge(graph.BoundaryVertex, false, GrowthGraph.Never);
         foreach (int vertex in defects)
         {
-            marks[vertex] |= Fired;
+            fired[vertex] = 1;
+            sites[vertex].Nearest = nobody;
         }
 
         foreach (int vertex in defects)
         {
-            nearest[vertex] = NearestTo(vertex);
+            MeetLater(vertex);
         }
 
         int count = 0;
         foreach (int vertex in defects)
         {
-            if (!TrySettle(vertex))
+            if (!TrySettle(vertex, !told.IsEmpty))
             {
                 unsettled[count++] = vertex;
             }
@@ -80,70 +81,76 @@ public sealed class UnionFindDecoder : IDecoder
         growth.Run();
         foreach (int vertex in defects)
         {
-            marks[vertex] = Quiet;
+            fired[vertex] = 0;
         }
 
         Restore(told);
         return growth.Finish() != 0;
     }
 
-    // the nearest neighbour that fired; none counts if a told edge is within two edges
-    private Nearest NearestTo(int vertex)
+    // neighbours that fired learn of each other
+    private void MeetLater(int vertex)
     {
-        int length = GrowthGraph.Never;
-        int place = -1;
-        int seen = marks[vertex];
-        int end = graph.First[vertex + 1];
-        for (int i = graph.First[vertex]; i < end; i++)
+        LaterNeighbours later = graph.Later;
+        for (int from = 0; from < later.RowLength; from += LaterNeighbours.Chunk)
         {
-            HalfEdge edge = graph.HalfEdges[i];
-            byte mark = marks[edge.Other];
-            if (mark != Quiet)
+            for (int marked = later.MarkedAmongEight(vertex, from, fired); marked != 0; marked &= marked - 1)
             {
-                seen |= mark;
-                if ((mark & Fired) != 0 && edge.Length < length)
-                {
-                    length = edge.Length;
-                    place = i;
-                }
+                int place = later.FirstEdge(vertex) + from + BitOperations.TrailingZeroCount(marked) - 1;
+                HalfEdge edge = graph.HalfEdges[place];
+                ref DefectSite here = ref sites[vertex];
+                ref DefectSite there = ref sites[edge.Other];
+                here.Nearest = Nearer(here.Nearest, edge);
+                there.Nearest = Nearer(there.Nearest, edge.To(vertex));
             }
         }
-
-        return new Nearest(place, (seen & Told) != 0 ? 0 : length);
     }
 
+    private static HalfEdge Nearer(HalfEdge one, HalfEdge other) => other.Length < one.Length ? other : one;
+
     // Settles what growth would settle in the same way: two defects that are each other's nearest, or one and the boundary, if they meet before
-    // anything else can meet either. Whatever grows near them later finds them as growth would have left them.
-    private bool TrySettle(int vertex)
+    // anything else can meet either. Whatever grows near them later finds them as growth would have left them. Told edges may be shorter than
+    // the surroundings know.
+    private bool TrySettle(int vertex, bool anyTold)
     {
-        Nearest near = nearest[vertex];
-        ref readonly Surroundings around = ref graph.Surroundings[vertex];
+        ref readonly DefectSite around = ref sites[vertex];
+        HalfEdge near = around.Nearest;
         if (near.Length > around.BoundaryDiameter)
         {
-            growth.AddSettled(vertex, around.BoundaryDiameter / 2, around.BoundaryFlips ? 1 : 0);
+            if (anyTold && IsNearTold(vertex))
+            {
+                return false;
+            }
+
+            growth.AddSettled(vertex, around.BoundaryDiameter / 2, graph.HalfEdges[graph.First[vertex]].FlipsObservable);
             return true;
         }
 
-        if (near.Place < 0 || near.Length == 0)
-        {
-            return false;
-        }
-
-        HalfEdge edge = graph.HalfEdges[near.Place];
-        int other = edge.Other;
-        Nearest back = nearest[other];
-        if (back.Length == 0 || back.Place < 0 || graph.HalfEdges[back.Place].Other != vertex
-            || near.Length > Math.Min(around.QuietDiameter, graph.Surroundings[other].QuietDiameter))
+        int other = near.Other;
+        if (other == graph.BoundaryVertex || sites[other].Nearest.Other != vertex
+            || near.Length > Math.Min(around.QuietDiameter, sites[other].QuietDiameter)
+            || (anyTold && (IsNearTold(vertex) || IsNearTold(other))))
         {
             return false;
         }
 
         if (vertex < other)
         {
-            growth.AddSettledPair(vertex, other, (near.Length + 1) / 2, edge.FlipsObservable);
+            growth.AddSettledPair(vertex, other, (near.Length + 1) / 2, near.FlipsObservable);
         }
 
         return true;
+    }
+
+    private bool IsNearTold(int vertex)
+    {
+        int seen = beside[vertex];
+        foreach (ref readonly HalfEdge edge in graph.HalfEdges.AsSpan(graph.First[vertex]..graph.First[vertex + 1]))
+        {
+            seen |= beside[edge.Other];
+        }
+
+        return seen != 0;
     }
 
     private void Replace(ReadOnlySpan<ToldEdge> told)
@@ -157,8 +164,8 @@ public sealed class UnionFindDecoder : IDecoder
         {
             GraphEdge edge = detectors.Edges[told[i].Edge];
             replaced[i] = graph.Replace(told[i].Edge, told[i].Weight);
-            marks[edge.A] |= Told;
-            marks[edge.MeetsBoundary ? edge.A : edge.B] |= Told;
+            beside[edge.A] = 1;
+            beside[edge.MeetsBoundary ? edge.A : edge.B] = 1;
         }
     }
 
@@ -168,13 +175,8 @@ public sealed class UnionFindDecoder : IDecoder
         {
             GraphEdge edge = detectors.Edges[told[i].Edge];
             graph.ReplaceLength(told[i].Edge, replaced[i]);
-            marks[edge.A] = Quiet;
-            marks[edge.MeetsBoundary ? edge.A : edge.B] = Quiet;
+            beside[edge.A] = 0;
+            beside[edge.MeetsBoundary ? edge.A : edge.B] = 0;
         }
     }
-
-    /// <summary>The nearest neighbour that fired.</summary>
-    /// <param name="Place">Place of the half edge to it, −1 for none.</param>
-    /// <param name="Length">Length of that edge; 0 if nothing may be settled here.</param>
-    private readonly record struct Nearest(int Place, int Length);
 }

@@ -68,6 +68,17 @@ public sealed class UnionFindDecoderTests
         Assert.True(decoder.Decode([0, 1, 2, 3], []));
     }
 
+    [Fact]
+    public void Each_neighbour_of_a_vertex_with_many_is_matched_along_its_own_edge()
+    {
+        const int Neighbours = 30;
+        bool[] flips = [.. Enumerable.Range(0, Neighbours).Select(index => index * index % 7 < 2)];
+        var decoder = new UnionFindDecoder(
+            new DetectorGraph(Neighbours + 1, [.. flips.Select((flip, index) => new GraphEdge(0, index + 1, 0.01, flip))]));
+
+        Assert.Equal(flips, Enumerable.Range(1, Neighbours).Select(neighbour => decoder.Decode([0, neighbour], [])));
+    }
+
     // every edge told what it weighs anyway leaves nothing to settle beforehand; unequal probabilities leave no ties
     [Fact]
     public void Settling_what_is_plain_beforehand_changes_no_answer()
