@@ -31,7 +31,7 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     /// <summary>Total strength for given durations and the losses that go with them.</summary>
     internal NoiseStrength Strength(in CycleTimes times, in AtomLoss loss)
     {
-        ChannelSum sum = default;
+        StrengthSum sum = new(Weights, Array.Coherence.LossCheck.EveryRounds);
         Visit(times, loss, ref sum);
         return sum.Total;
     }
@@ -39,10 +39,18 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     /// <summary>The ledger for given durations, largest share first.</summary>
     public ErrorLedger Ledger(in CycleTimes times)
     {
-        ChannelList list = new();
+        ChannelList list = new(Weights, Array.Coherence.LossCheck.EveryRounds);
         Visit(times, Loss(times), ref list);
         list.Channels.Sort((a, b) => b.Strength.Mean.CompareTo(a.Strength.Mean));
         return new ErrorLedger([.. list.Channels]);
+    }
+
+    /// <summary>The errors of a round place by place, as a simulation of the round needs them.</summary>
+    public RoundErrors Errors(in CycleTimes times)
+    {
+        RoundErrorSum sum = new(Array.Coherence.LossCheck.EveryRounds);
+        Visit(times, Loss(times), ref sum);
+        return sum.Errors;
     }
 
     /// <summary>
@@ -83,7 +91,7 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         : default;
 
     private void Visit<TSink>(in CycleTimes times, in AtomLoss loss, ref TSink sink)
-        where TSink : struct, IChannelSink
+        where TSink : struct, IErrorSink
     {
         VisitGates(times, ref sink);
         VisitWaiting(times, ref sink);
@@ -92,42 +100,42 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
     }
 
     private void VisitGates<TSink>(in CycleTimes times, ref TSink sink)
-        where TSink : struct, IChannelSink
+        where TSink : struct, IErrorSink
     {
         double cz = _gate.PauliError;
         double oneQubit = Array.Gates.OneQubitPauliError;
         double checkShare = 1 / Array.Coherence.LossCheck.EveryRounds;
         double extraLayers = LossCheckPhases.ExtraLayers(_lossCheck) * checkShare;
-        double onData = GatePhases.OneQubitGatesPerData + Array.Coherence.EchoPulsesPerRound + (extraLayers > 0 ? 2 * checkShare : 0);
-        sink.Add("CZ gates", cz, SyndromeCycle.Layers, Weights.Cz(cz));
-        sink.Add("CZ gates of the loss check", cz, extraLayers, Weights.ExtraCzLayer(cz) * extraLayers);
-        sink.Add("One-qubit gates on data", oneQubit, onData, Weights.DataEvent(PauliChannel.Depolarising(oneQubit)) * onData);
-        sink.Add("One-qubit gates on checks", oneQubit, GatePhases.OneQubitGatesPerCheck, Weights.CheckGate(oneQubit) * GatePhases.OneQubitGatesPerCheck);
-        sink.Add("Check reset", Array.Gates.ResetFlip, 1, Weights.CheckReset(Array.Gates.ResetFlip));
+        double moreOnData = Array.Coherence.EchoPulsesPerRound + (extraLayers > 0 ? 2 * checkShare : 0);
+        sink.Add("CZ gates", ErrorSource.Of(ErrorLocation.CzGate, cz, SyndromeCycle.Layers));
+        sink.Add("CZ gates of the loss check", ErrorSource.Of(ErrorLocation.ExtraCzLayer, cz, extraLayers));
+        sink.Add("One-qubit gates on data", ErrorSource.Of(ErrorLocation.GateOnData, oneQubit, GatePhases.OneQubitGatesPerData));
+        sink.Add("Echo pulses and turns of the loss check", ErrorSource.Of(ErrorLocation.DataAtom, oneQubit, moreOnData));
+        sink.Add("One-qubit gates on checks", ErrorSource.Of(ErrorLocation.CheckOutsideLayers, oneQubit, GatePhases.OneQubitGatesPerCheck));
+        sink.Add("Check reset", ErrorSource.Of(ErrorLocation.CheckReset, Array.Gates.ResetFlip, 1));
         if (Array.Reach is MovedAtoms { HandoffInfidelity: > 0 } moved)
         {
             double handoff = Gates.PauliErrorOfOneQubit(moved.HandoffInfidelity);
             bool everyLeg = times.ChecksMoveInGroups || !moved.CheckGridsMoveTogether;
-            double handoffs = everyLeg ? 2 * GatePhases.MovesPerCheck : 2;
-            NoiseStrength each = everyLeg ? Weights.CheckInSequence(handoff) : Weights.CheckGate(handoff);
-            sink.Add("Handoffs of checks", handoff, handoffs, each * handoffs);
+            sink.Add("Handoffs of checks", everyLeg
+                ? ErrorSource.Of(ErrorLocation.CheckBetweenLayers, handoff, 2 * GatePhases.MovesPerCheck)
+                : ErrorSource.Of(ErrorLocation.CheckOutsideLayers, handoff, 2));
         }
     }
 
     private void VisitWaiting<TSink>(in CycleTimes times, ref TSink sink)
-        where TSink : struct, IChannelSink
+        where TSink : struct, IErrorSink
     {
         Coherence coherence = Array.Coherence;
         PauliChannel inLayer = PauliChannel.Waiting(times.LayerSeconds, coherence.T1Seconds, coherence.T2Seconds);
         PauliChannel outside = PauliChannel.Waiting(times.WaitingSeconds, coherence.T1Seconds, coherence.T2Seconds);
-        PauliChannel shelved = ShelvedWaiting(times);
-        sink.Add("Waiting in CZ layers", inLayer.Total, SyndromeCycle.Layers, Weights.WaitingPerLayer(inLayer));
-        sink.Add("Waiting outside the layers", outside.Total, 1, Weights.DataEvent(outside));
-        sink.Add("Waiting while shelved", shelved.Total, 1, Weights.DataEvent(shelved));
+        sink.Add("Waiting in CZ layers", new ErrorSource(ErrorLocation.WaitingInLayer, inLayer, SyndromeCycle.Layers));
+        sink.Add("Waiting outside the layers", new ErrorSource(ErrorLocation.DataAtom, outside, 1));
+        sink.Add("Waiting while shelved", new ErrorSource(ErrorLocation.DataAtom, ShelvedWaiting(times), 1));
     }
 
     private void VisitReadout<TSink>(ref TSink sink)
-        where TSink : struct, IChannelSink
+        where TSink : struct, IErrorSink
     {
         double looks = 1 + (_lossCheck == LossCheckMethod.ExtraCheck ? 1 / Array.Coherence.LossCheck.EveryRounds : 0);
         double lit = Cycle.Reading.ExposureSeconds + Cycle.Scheme.RecoolSeconds;
@@ -140,20 +148,20 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
             _ => 0,
         };
         double light = -ElementaryFunctions.ExpMinusOne(-rate * lit);
-        sink.Add("Light on data during readout", light, looks, Weights.DataEvent(PauliChannel.Depolarising(light)) * looks);
-        sink.Add("Check readout", Cycle.Reading.Flip, 1, Weights.CheckFlip(Cycle.Reading.Flip));
+        sink.Add("Light on data during readout", ErrorSource.Of(ErrorLocation.DataAtom, light, looks));
+        sink.Add("Check readout", ErrorSource.Of(ErrorLocation.CheckFlip, Cycle.Reading.Flip, 1));
         if (Cycle.Scheme is Shelved scheme)
         {
             double pulse = Gates.PauliErrorOfOneQubit(scheme.ShelveInfidelity);
             double select = Gates.PauliErrorOfOneQubit(scheme.SelectInfidelity);
-            sink.Add("Shelving pulses on data", pulse, 2 * looks, Weights.DataEvent(PauliChannel.Depolarising(pulse)) * (2 * looks));
-            sink.Add("Shelving and selecting checks", pulse + select, 1, Weights.CheckFlip(pulse + select));
-            sink.Add("Crosstalk of selecting", scheme.SelectCrosstalk, looks, Weights.DataEvent(PauliChannel.Depolarising(scheme.SelectCrosstalk)) * looks);
+            sink.Add("Shelving pulses on data", ErrorSource.Of(ErrorLocation.DataAtom, pulse, 2 * looks));
+            sink.Add("Shelving and selecting checks", ErrorSource.Of(ErrorLocation.CheckFlip, pulse + select, 1));
+            sink.Add("Crosstalk of selecting", ErrorSource.Of(ErrorLocation.DataAtom, scheme.SelectCrosstalk, looks));
         }
     }
 
     private void VisitLoss<TSink>(in AtomLoss loss, ref TSink sink)
-        where TSink : struct, IChannelSink
+        where TSink : struct, IErrorSink
     {
         double lookLater = Cycle.Scheme is MovedApart { ReadInRound: false } ? Cycle.Reading.LossPerLook * (1 - LooksAtData) : 0;
         double data = loss.PerGateSlot + (loss.DataPerRound / SyndromeCycle.Layers);
@@ -161,23 +169,20 @@ public sealed class AtomNoise(AtomArray array, SyndromeCycle cycle, ChannelWeigh
         bool tells = Cycle.Scheme.Detector.TellsLoss;
         if (tells || _lossCheck == LossCheckMethod.ExtraCheck)
         {
-            sink.Add("Loss of data atoms", data, SyndromeCycle.Layers, LossWeights.Told(data, Array.Coherence.LossCheck.EveryRounds));
+            sink.Add("Loss of data atoms", ErrorSource.Of(ErrorLocation.ToldLossOfData, data, SyndromeCycle.Layers));
         }
         else
         {
-            // nobody tells the decoder: a lost atom counts as an error of its gate, and as a random qubit in the rounds until it is replaced
-            double roundsUntilReplaced = (Array.Coherence.LossCheck.EveryRounds - 1) / 2;
-            NoiseStrength random = Weights.DataEvent(PauliChannel.Depolarising(0.75 * SyndromeCycle.Layers * data * roundsUntilReplaced));
-            sink.Add("Loss of data atoms, not told", data, SyndromeCycle.Layers, Weights.Cz(data) + random);
+            sink.Add("Loss of data atoms, not told", ErrorSource.Of(ErrorLocation.UntoldLossOfData, data, SyndromeCycle.Layers));
         }
 
         if (tells)
         {
-            sink.Add("Loss of check atoms", check, SyndromeCycle.Layers, LossWeights.Told(check, 1));
+            sink.Add("Loss of check atoms", ErrorSource.Of(ErrorLocation.ToldLossOfChecks, check, SyndromeCycle.Layers));
         }
         else
         {
-            sink.Add("Loss of check atoms, not told", check, SyndromeCycle.Layers, Weights.Cz(check));
+            sink.Add("Loss of check atoms, not told", ErrorSource.Of(ErrorLocation.UntoldLossOfChecks, check, SyndromeCycle.Layers));
         }
     }
 }

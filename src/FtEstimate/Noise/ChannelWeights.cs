@@ -24,6 +24,39 @@ public readonly record struct ChannelWeights(double Scale)
     /// <summary>Weights for a law with the given threshold.</summary>
     public static ChannelWeights For(double threshold) => new(ReferenceThreshold / threshold);
 
+    /// <summary>Strength of one cause.</summary>
+    /// <param name="source">The cause.</param>
+    /// <param name="roundsBetweenLooks">Rounds between two looks at a data atom, at least 1; matters for losses only.</param>
+    public NoiseStrength Of(in ErrorSource source, double roundsBetweenLooks)
+    {
+        double p = source.Probability;
+        double times = source.TimesPerRound;
+        return source.Location switch
+        {
+            ErrorLocation.CzGate => Cz(p),
+            ErrorLocation.ExtraCzLayer => ExtraCzLayer(p) * times,
+            ErrorLocation.WaitingInLayer => WaitingPerLayer(source.Channel),
+            ErrorLocation.GateOnData or ErrorLocation.DataAtom => DataEvent(source.Channel) * times,
+            ErrorLocation.CheckOutsideLayers => CheckGate(p) * times,
+            ErrorLocation.CheckBetweenLayers => CheckInSequence(p) * times,
+            ErrorLocation.CheckFlip => CheckFlip(p) * times,
+            ErrorLocation.CheckReset => CheckReset(p) * times,
+            ErrorLocation.ToldLossOfData => LossWeights.Told(p, roundsBetweenLooks),
+            ErrorLocation.ToldLossOfChecks => LossWeights.Told(p, 1),
+            ErrorLocation.UntoldLossOfData => UntoldLossOfData(p, roundsBetweenLooks),
+            ErrorLocation.UntoldLossOfChecks => Cz(p),
+            _ => throw new ArgumentOutOfRangeException(nameof(source)),
+        };
+    }
+
+    /// <summary>A lost atom counts as an error of its gate, and as a random qubit in the rounds until it is replaced.</summary>
+    private NoiseStrength UntoldLossOfData(double probability, double roundsBetweenLooks)
+    {
+        double roundsUntilReplaced = (roundsBetweenLooks - 1) / 2;
+        double perRound = 4 * probability;
+        return Cz(probability) + DataEvent(PauliChannel.Depolarising(0.75 * perRound * roundsUntilReplaced));
+    }
+
     /// <summary>CZ gates, all four layers.</summary>
     public NoiseStrength Cz(double probability) => NoiseStrength.Even(Scale * CzWeight * probability);
 

@@ -37,34 +37,38 @@ public sealed record ErrorLedger(ImmutableArray<ErrorChannel> Channels)
 }
 
 /// <summary>Receives the causes one by one; a sum needs no list.</summary>
-internal interface IChannelSink
+internal interface IErrorSink
 {
     /// <summary>Takes one cause.</summary>
-    void Add(string name, double perLocation, double timesPerRound, NoiseStrength strength);
+    void Add(string name, in ErrorSource source);
 }
 
 /// <summary>Adds the strengths up.</summary>
-internal struct ChannelSum : IChannelSink
+/// <param name="weights">How causes count.</param>
+/// <param name="roundsBetweenLooks">Rounds between two looks at a data atom.</param>
+internal struct StrengthSum(ChannelWeights weights, double roundsBetweenLooks) : IErrorSink
 {
     /// <summary>The sum so far.</summary>
     public NoiseStrength Total;
 
     /// <inheritdoc/>
-    public void Add(string name, double perLocation, double timesPerRound, NoiseStrength strength) => Total += strength;
+    public void Add(string name, in ErrorSource source) => Total += weights.Of(source, roundsBetweenLooks);
 }
 
 /// <summary>Keeps the causes for a report.</summary>
-internal readonly struct ChannelList() : IChannelSink
+/// <param name="weights">How causes count.</param>
+/// <param name="roundsBetweenLooks">Rounds between two looks at a data atom.</param>
+internal readonly struct ChannelList(ChannelWeights weights, double roundsBetweenLooks) : IErrorSink
 {
     /// <summary>The causes so far.</summary>
     public List<ErrorChannel> Channels { get; } = [];
 
     /// <inheritdoc/>
-    public void Add(string name, double perLocation, double timesPerRound, NoiseStrength strength)
+    public void Add(string name, in ErrorSource source)
     {
-        if (perLocation > 0 && timesPerRound > 0)
+        if (source.Probability > 0 && source.TimesPerRound > 0)
         {
-            Channels.Add(new ErrorChannel(name, perLocation, timesPerRound, strength));
+            Channels.Add(new ErrorChannel(name, source.Probability, source.TimesPerRound, weights.Of(source, roundsBetweenLooks)));
         }
     }
 }

@@ -28,4 +28,18 @@ public readonly record struct PauliChannel(double X, double Y, double Z)
         double dephased = -ElementaryFunctions.ExpMinusOne(-seconds / t2Seconds) / 2;
         return new(relaxed, relaxed, Math.Max(dephased - relaxed, 0));
     }
+
+    /// <summary>This channel and another one after it.</summary>
+    public PauliChannel Then(PauliChannel next)
+    {
+        double kept = 1 - Total;
+        double nextKept = 1 - next.Total;
+        return new(
+            (X * nextKept) + (kept * next.X) + (Y * next.Z) + (Z * next.Y),
+            (Y * nextKept) + (kept * next.Y) + (X * next.Z) + (Z * next.X),
+            (Z * nextKept) + (kept * next.Z) + (X * next.Y) + (Y * next.X));
+    }
+
+    /// <summary>This channel so many times on average, first order in the broken part.</summary>
+    public PauliChannel Times(double count) => new(X * count, Y * count, Z * count);
 }
