@@ -72,16 +72,41 @@ internal sealed partial class AlternatingForest
         return new Meeting(earliest, along);
     }
 
-    /// <summary>Takes a vertex into account whose region has begun to grow or has arrived.</summary>
+    /// <summary>Takes a vertex into account whose region has begun to grow or has arrived; growing neighbours are told.</summary>
     private void Begin(int vertex)
     {
-        long first = FirstMeeting(vertex).Time;
-        if (first < Never)
+        ref CoveredVertex here = ref vertices[vertex];
+        long reach = here.Offset + regions[here.Top].Intercept;
+        long earliest = Never;
+        foreach (HalfEdge half in edges.At(vertex))
         {
-            Schedule(vertex, Math.Max(first, now));
+            long time = half.Weight - reach;
+            if (half.Other >= 0)
+            {
+                ref CoveredVertex there = ref vertices[half.Other];
+                if (there.Top >= 0)
+                {
+                    ref Region region = ref regions[there.Top];
+                    if (there.Top == here.Top || region.Slope < 0)
+                    {
+                        continue;
+                    }
+
+                    time = (time - there.Offset - region.Intercept) >> region.Slope;
+                    if (region.Slope > 0)
+                    {
+                        Schedule(half.Other, Math.Max(time, now));
+                    }
+                }
+            }
+
+            earliest = Math.Min(earliest, time);
         }
 
-        Announce(vertex);
+        if (earliest < Never)
+        {
+            Schedule(vertex, Math.Max(earliest, now));
+        }
     }
 
     /// <summary>Tells growing neighbours when they meet a vertex that is free or whose region does not shrink.</summary>

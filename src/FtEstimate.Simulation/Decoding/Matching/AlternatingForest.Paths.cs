@@ -3,7 +3,7 @@ namespace FtEstimate.Simulation.Decoding.Matching;
 internal sealed partial class AlternatingForest
 {
     private TightPath[] paths = [];
-    private TightPath[] blossomsToOpen = [];
+    private ClosedBlossom[] blossomsToOpen = [];
     private int pathCount;
 
     /// <summary>The paths of the matching, each once, and none for a defect that stayed alone.</summary>
@@ -91,7 +91,7 @@ internal sealed partial class AlternatingForest
     {
         int parity = 0;
         int waiting = 0;
-        blossomsToOpen[waiting++] = new TightPath(blossom, entry);
+        blossomsToOpen[waiting++] = new ClosedBlossom(blossom, entry);
         while (waiting > 0)
         {
             (int opened, int outward) = blossomsToOpen[--waiting];
@@ -116,7 +116,7 @@ internal sealed partial class AlternatingForest
         Dual += regions[child].Intercept;
         if (regions[child].Child >= 0)
         {
-            blossomsToOpen[waiting++] = new TightPath(child, outward);
+            blossomsToOpen[waiting++] = new ClosedBlossom(child, outward);
         }
     }
 
@@ -125,4 +125,7 @@ internal sealed partial class AlternatingForest
         paths[pathCount++] = path;
         return path.Parity;
     }
+
+    /// <summary>A blossom of the matching, and the vertex of its only defect that is matched outside.</summary>
+    private readonly record struct ClosedBlossom(int Region, int Outward);
 }

@@ -3,13 +3,53 @@ namespace FtEstimate.Simulation.Decoding.Matching;
 // A tree alternates between growing regions and shrinking ones; a shrinking region is matched with its only child. The root alone is unmatched.
 internal sealed partial class AlternatingForest
 {
-    /// <summary>The defects next to each other or to the boundary are matched before anything grows.</summary>
+    /// <summary>
+    /// Before anything grows, matches the defects that are each other's nearest neighbours or nearest to the boundary. Their regions stay on their
+    /// own edges, so that all radii are those of a dual solution, and the search may start from there.
+    /// </summary>
     private void Settle(ReadOnlySpan<int> defects)
     {
-        foreach (int vertex in defects)
+        for (int region = 0; region < defects.Length; region++)
         {
-            Schedule(vertex, FirstMeeting(vertex).Time);
+            if (regions[region].Slope == 0)
+            {
+                continue;
+            }
+
+            int vertex = defects[region];
+            Meeting first = FirstMeeting(vertex);
+            int other = first.Along.Other;
+            if (first.Time == Never)
+            {
+                continue;
+            }
+
+            if (other < 0)
+            {
+                Settle(region, first.Time, new TightPath(vertex, -2 | first.Along.Parity));
+            }
+            else if (vertices[other].Top >= 0 && regions[vertices[other].Top].Slope > 0 && FirstMeeting(other).Time == first.Time)
+            {
+                TightPath path = new(vertex, (other << 1) | first.Along.Parity);
+                Settle(region, first.Time, path);
+                Settle(vertices[other].Top, first.Time, path.Reversed());
+            }
+            else
+            {
+                Schedule(vertex, first.Time);
+            }
         }
+    }
+
+    private void Settle(int region, long radius, TightPath path)
+    {
+        ref Region it = ref regions[region];
+        it.Intercept = radius;
+        it.Slope = 0;
+        it.Match = path;
+        firstMember[region] = -1;
+        it.Tree = -1;
+        treeCount--;
     }
 
     private void MeetBoundary(int region, TightPath path)

@@ -2,7 +2,7 @@ namespace FtEstimate.Simulation.Decoding.Matching;
 
 /// <summary>
 /// The alternating trees that grow from the defects of a shot until every one is matched. This file holds the state and its beginning and end;
-/// <c>Growth</c> moves the regions over the graph, <c>Trees</c> and <c>Blossoms</c> say what happens where they meet, <c>Paths</c> reads the matching off.
+/// <c>Growth</c> moves the regions over the graph, <c>Trees</c> and <c>Blossoms</c> say what happens where they meet, <c>Inside</c> walks blossoms, <c>Paths</c> reads the matching off.
 /// </summary>
 internal sealed partial class AlternatingForest
 {
@@ -94,7 +94,7 @@ internal sealed partial class AlternatingForest
 
         // the last one is taken first: names then do not depend on what was decoded before
         freeCount = 0;
-        for (int region = regions.Length - 1; region >= defectCount; region--)
+        for (int region = (2 * defectCount) + 1; region >= defectCount; region--)
         {
             freeRegions[freeCount++] = region;
         }
@@ -124,7 +124,7 @@ internal sealed partial class AlternatingForest
             firstMember = new int[room];
             freeRegions = new int[room];
             paths = new TightPath[room];
-            blossomsToOpen = new TightPath[room];
+            blossomsToOpen = new ClosedBlossom[room];
         }
 
         firstMember.AsSpan(0, defectCount).Fill(-1);

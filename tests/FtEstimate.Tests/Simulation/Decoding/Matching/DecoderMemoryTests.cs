@@ -29,7 +29,7 @@ public sealed class DecoderMemoryTests
             Assert.Equal(fresh.LastPaths, used.LastPaths);
             Assert.Equal(fresh.LastDual, used.LastDual);
         },
-        iter: 1000);
+        iter: 400);
 
     [Fact]
     public void A_warm_decoder_allocates_nothing()

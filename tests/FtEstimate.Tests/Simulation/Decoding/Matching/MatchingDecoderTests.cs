@@ -12,20 +12,20 @@ public sealed class MatchingDecoderTests
 
     [Fact]
     public void The_weight_is_the_least_of_all_pairings() => Gen.ULong.Sample(
-        seed => AssertLeastOfAllPairings(DecodingCase.Of(seed, 14, 10)), iter: Iterations(20_000));
+        seed => AssertLeastOfAllPairings(DecodingCase.Of(seed, 14, 10)), iter: 20_000);
 
     [Fact]
     public void The_weight_of_many_defects_is_the_least_of_all_pairings() => Gen.ULong.Sample(
-        seed => AssertLeastOfAllPairings(DecodingCase.Of(seed, 40, 15)), iter: Iterations(200));
+        seed => AssertLeastOfAllPairings(DecodingCase.Of(seed, 40, 15)), iter: 200);
 
     // weak duality: no pairing weighs less than the sum of the radii if no two defects are nearer than what separates them (Edmonds 1965)
     [Fact]
     public void The_radii_prove_the_matching_of_hundreds_of_defects() => Gen.ULong.Sample(
-        seed => AssertProvenByRadii(DecodingCase.Of(seed, 500, 250)), iter: Iterations(60));
+        seed => AssertProvenByRadii(DecodingCase.Of(seed, 500, 250)), iter: 40);
 
     [Fact]
     public void The_radii_prove_the_matching_of_a_code_over_rounds() => Gen.ULong.Sample(
-        seed => AssertProvenByRadii(LayeredCase(seed)), iter: Iterations(20));
+        seed => AssertProvenByRadii(LayeredCase(seed)), iter: 20);
 
     [Fact]
     public void An_isolated_pair_is_matched_along_the_cheapest_path()
@@ -98,9 +98,6 @@ public sealed class MatchingDecoderTests
         return new DecodingCase(graph, [.. Enumerable.Range(0, fired.Length).Where(vertex => fired[vertex])], [.. told]);
     }
 
-    private static int Iterations(int count) =>
-        int.Parse(Environment.GetEnvironmentVariable("MATCHING_FACTOR") ?? "1", System.Globalization.CultureInfo.InvariantCulture) * count;
-
     private static void AssertLeastOfAllPairings(DecodingCase given)
     {
         MatchingDecoder decoder = new(given.Graph);
@@ -126,8 +123,9 @@ public sealed class MatchingDecoderTests
 
         decoder.Decode(given.Defects, given.Told);
 
-        if (2 * decoder.LastPaths.Length - CountOfBoundaryPaths(decoder) < given.Defects.Length)
+        if ((2 * decoder.LastPaths.Length) - CountOfBoundaryPaths(decoder) < given.Defects.Length)
         {
+            // somebody stayed alone: there is no perfect matching
             return;
         }
 
