@@ -20,6 +20,7 @@ public static class App
             WorkloadCommand.Create(),
             FactoriesCommand.Create(),
             ValidationCommand.Create(),
+            CalibrateCommand.Create(),
         };
         root.SetAction(parsed => new System.CommandLine.Help.HelpAction().Invoke(parsed));
 

@@ -1,28 +1,78 @@
+using System.Collections.Immutable;
+
 namespace FtEstimate.Noise;
 
-/// <summary>
-/// How strongly each kind of error counts towards the noise strength x, per unit probability, first order.
-/// Interim values from a Monte Carlo of distances 5 and 7 that is not part of this repository (within 9 % in Λ on eight noise mixes; not published),
-/// for a law whose threshold is <see cref="ReferenceThreshold"/>; they scale with the threshold of the law in use.
-/// </summary>
-/// <param name="Scale">Reference threshold over the threshold of the law in use.</param>
-public readonly record struct ChannelWeights(double Scale)
+/// <summary>What a weight belongs to.</summary>
+public enum NoiseWeight
 {
-    /// <summary>Threshold of the uniform circuit that the weights refer to.</summary>
-    public const double ReferenceThreshold = 0.0056;
+    /// <summary>CZ gates of all four layers, per Pauli probability of one gate.</summary>
+    CzGate,
 
-    private const double CzWeight = 92;
-    private const double WaitingPerLayerWeight = 143;
-    private const double DataEventWeight = 23;
-    private const double CheckFlipWeight = 5.5;
-    private const double CheckResetWeight = 5;
-    private const double CheckGateWeight = 5;
+    /// <summary>Bit flips (X or Y) of every atom in each of the four CZ layers.</summary>
+    WaitingBitFlip,
 
-    // what waiting of every atom costs beyond the four data events of the layers falls on the checks
-    private const double CheckInSequenceWeight = (WaitingPerLayerWeight - (4 * DataEventWeight)) / 4;
+    /// <summary>Phase flips (Z or Y) of every atom in each of the four CZ layers.</summary>
+    WaitingPhaseFlip,
 
-    /// <summary>Weights for a law with the given threshold.</summary>
-    public static ChannelWeights For(double threshold) => new(ReferenceThreshold / threshold);
+    /// <summary>One flip per round on each data atom that the basis can see.</summary>
+    DataFlip,
+
+    /// <summary>One-qubit gates on data, per Pauli probability and gate.</summary>
+    GateOnData,
+
+    /// <summary>Errors of checks before or after their layers, per Pauli probability and time.</summary>
+    CheckOutsideLayers,
+
+    /// <summary>Errors of checks at their moves, per Pauli probability and time.</summary>
+    CheckBetweenLayers,
+
+    /// <summary>Checks read wrongly.</summary>
+    CheckFlip,
+
+    /// <summary>Checks reset wrongly.</summary>
+    CheckReset,
+
+    /// <summary>Data atoms lost per gate slot, looked at in every round.</summary>
+    ToldLossOfData,
+
+    /// <summary>More for every further round between two looks.</summary>
+    ToldLossOfDataPerRound,
+
+    /// <summary>Checks lost per gate slot, told by their readout.</summary>
+    ToldLossOfChecks,
+
+    /// <summary>Data atoms lost per gate slot, replaced in every round, untold.</summary>
+    UntoldLossOfData,
+
+    /// <summary>More for every further round until they are replaced.</summary>
+    UntoldLossOfDataPerRound,
+
+    /// <summary>Checks lost per gate slot, untold.</summary>
+    UntoldLossOfChecks,
+}
+
+/// <summary>
+/// How strongly each kind of error counts towards the noise strength x, per unit probability, first order. Fitted to this project's own Monte Carlo of the
+/// CZ-native memory circuit together with the simulated law (docs/method.md); for another law they scale with its threshold.
+/// </summary>
+/// <param name="Values">One weight for each <see cref="NoiseWeight"/>, in that order.</param>
+public sealed record ChannelWeights(ImmutableArray<double> Values)
+{
+    /// <summary>Share of the errors of a pair that strike one of its atoms: 12 of 15.</summary>
+    private const double PairErrorsOnOneAtom = 0.8;
+
+    /// <summary>The fitted weights, for the simulated law.</summary>
+    public static ChannelWeights Fitted { get; } = new([.. Enum.GetValues<NoiseWeight>().Select(weight => FittedNumbers.Value(weight.ToString()))]);
+
+    /// <summary>The weight of a kind.</summary>
+    public double this[NoiseWeight weight] => Values[(int)weight];
+
+    /// <summary>The fitted weights for a law with the given threshold of the uniform textbook circuit.</summary>
+    public static ChannelWeights For(double threshold)
+    {
+        double scale = FittedNumbers.UniformThreshold / threshold;
+        return new([.. Fitted.Values.Select(value => value * scale)]);
+    }
 
     /// <summary>Strength of one cause.</summary>
     /// <param name="source">The cause.</param>
@@ -31,72 +81,36 @@ public readonly record struct ChannelWeights(double Scale)
     {
         double p = source.Probability;
         double times = source.TimesPerRound;
+        double moreRounds = roundsBetweenLooks - 1;
         return source.Location switch
         {
-            ErrorLocation.CzGate => Cz(p),
-            ErrorLocation.ExtraCzLayer => ExtraCzLayer(p) * times,
-            ErrorLocation.WaitingInLayer => WaitingPerLayer(source.Channel),
-            ErrorLocation.GateOnData or ErrorLocation.DataAtom => DataEvent(source.Channel) * times,
-            ErrorLocation.CheckOutsideLayers => CheckGate(p) * times,
-            ErrorLocation.CheckBetweenLayers => CheckInSequence(p) * times,
-            ErrorLocation.CheckFlip => CheckFlip(p) * times,
-            ErrorLocation.CheckReset => CheckReset(p) * times,
-            ErrorLocation.ToldLossOfData => LossWeights.Told(p, roundsBetweenLooks),
-            ErrorLocation.ToldLossOfChecks => LossWeights.Told(p, 1),
-            ErrorLocation.UntoldLossOfData => UntoldLossOfData(p, roundsBetweenLooks),
-            ErrorLocation.UntoldLossOfChecks => Cz(p),
+            ErrorLocation.CzGate => Even(NoiseWeight.CzGate, p),
+            ErrorLocation.ExtraCzLayer => OnData(PauliChannel.Depolarising(PairErrorsOnOneAtom * p)) * times,
+            ErrorLocation.WaitingInLayer => Waiting(source.Channel),
+            ErrorLocation.GateOnData => Even(NoiseWeight.GateOnData, p * times),
+            ErrorLocation.DataAtom => OnData(source.Channel) * times,
+            ErrorLocation.CheckOutsideLayers => Even(NoiseWeight.CheckOutsideLayers, p * times),
+            ErrorLocation.CheckBetweenLayers => Even(NoiseWeight.CheckBetweenLayers, p * times),
+            ErrorLocation.CheckFlip => Even(NoiseWeight.CheckFlip, p * times),
+            ErrorLocation.CheckReset => Even(NoiseWeight.CheckReset, p * times),
+            ErrorLocation.ToldLossOfData => Even(NoiseWeight.ToldLossOfData, p) + Even(NoiseWeight.ToldLossOfDataPerRound, p * moreRounds),
+            ErrorLocation.ToldLossOfChecks => Even(NoiseWeight.ToldLossOfChecks, p),
+            ErrorLocation.UntoldLossOfData => Even(NoiseWeight.UntoldLossOfData, p) + Even(NoiseWeight.UntoldLossOfDataPerRound, p * moreRounds),
+            ErrorLocation.UntoldLossOfChecks => Even(NoiseWeight.UntoldLossOfChecks, p),
             _ => throw new ArgumentOutOfRangeException(nameof(source)),
         };
     }
 
-    /// <summary>A lost atom counts as an error of its gate, and as a random qubit in the rounds until it is replaced.</summary>
-    private NoiseStrength UntoldLossOfData(double probability, double roundsBetweenLooks)
+    /// <summary>Data atoms sit half the time in the Hadamard frame, so both bases see half of either flip.</summary>
+    private NoiseStrength Waiting(PauliChannel channel) =>
+        Even(NoiseWeight.WaitingBitFlip, channel.X + channel.Y) + Even(NoiseWeight.WaitingPhaseFlip, channel.Z + channel.Y);
+
+    /// <summary>Z and Y errors flip logical X, X and Y errors flip logical Z.</summary>
+    private NoiseStrength OnData(PauliChannel channel)
     {
-        double roundsUntilReplaced = (roundsBetweenLooks - 1) / 2;
-        double perRound = 4 * probability;
-        return Cz(probability) + DataEvent(PauliChannel.Depolarising(0.75 * perRound * roundsUntilReplaced));
+        double weight = this[NoiseWeight.DataFlip];
+        return new(weight * (channel.Z + channel.Y), weight * (channel.X + channel.Y));
     }
 
-    /// <summary>CZ gates, all four layers.</summary>
-    public NoiseStrength Cz(double probability) => NoiseStrength.Even(Scale * CzWeight * probability);
-
-    /// <summary>One more CZ layer.</summary>
-    public NoiseStrength ExtraCzLayer(double probability) => Cz(probability / 4);
-
-    /// <summary>Waiting of every atom in each CZ layer; data atoms sit half the time in the Hadamard frame.</summary>
-    public NoiseStrength WaitingPerLayer(PauliChannel channel) =>
-        NoiseStrength.Even(Scale * WaitingPerLayerWeight * 0.75 * (channel.X + channel.Z + (2 * channel.Y)));
-
-    /// <summary>One event on each data atom per round; Z and Y errors flip logical X, X and Y errors flip logical Z.</summary>
-    public NoiseStrength DataEvent(PauliChannel channel) => new(
-        Scale * DataEventWeight * 1.5 * (channel.Z + channel.Y),
-        Scale * DataEventWeight * 1.5 * (channel.X + channel.Y));
-
-    /// <summary>A check read wrongly.</summary>
-    public NoiseStrength CheckFlip(double probability) => NoiseStrength.Even(Scale * CheckFlipWeight * probability);
-
-    /// <summary>A check that starts in the wrong state.</summary>
-    public NoiseStrength CheckReset(double probability) => NoiseStrength.Even(Scale * CheckResetWeight * probability);
-
-    /// <summary>A gate on each check before or after its CZ layers.</summary>
-    public NoiseStrength CheckGate(double probability) => NoiseStrength.Even(Scale * CheckGateWeight * probability);
-
-    /// <summary>An error on each check between its CZ layers.</summary>
-    public NoiseStrength CheckInSequence(double probability) => NoiseStrength.Even(Scale * CheckInSequenceWeight * probability);
-
-    /// <summary>
-    /// The uniform textbook circuit at one rate p for every location: CZ; the 2d−1 atoms without a gate in each layer; three waits of each data atom (two
-    /// Hadamard layers, measure and reset); flips; Hadamards on half of the checks, twice.
-    /// </summary>
-    public NoiseStrength Uniform(double probability, int distance)
-    {
-        double idle = ((2.0 * distance) - 1) / ((2.0 * distance * distance) - 1);
-        PauliChannel event1 = PauliChannel.Depolarising(probability);
-        return Cz(probability)
-            + WaitingPerLayer(PauliChannel.Depolarising(probability * idle))
-            + (DataEvent(event1) * 3)
-            + CheckFlip(probability)
-            + CheckReset(probability)
-            + CheckGate(probability);
-    }
+    private NoiseStrength Even(NoiseWeight weight, double probability) => NoiseStrength.Even(this[weight] * probability);
 }

@@ -3,6 +3,9 @@ namespace FtEstimate.Noise;
 /// <summary>The errors of one round of the CZ-native circuit, place by place.</summary>
 public sealed record RoundErrors
 {
+    /// <summary>Moves of a check in a round.</summary>
+    internal const double MovesPerCheck = 5;
+
     /// <summary>Pauli probability of a CZ gate, spread evenly over its 15 errors.</summary>
     public double CzGate { get; init; }
 
@@ -41,13 +44,37 @@ public sealed record RoundErrors
 
     /// <summary>Rounds between two looks at the data atoms, at least 1.</summary>
     public int RoundsBetweenLooks { get; init; } = 1;
+
+    /// <summary>The strength of these errors.</summary>
+    public NoiseStrength Strength(ChannelWeights weights)
+    {
+        NoiseStrength sum = default;
+        foreach (ErrorSource source in Sources())
+        {
+            sum += weights.Of(source, RoundsBetweenLooks);
+        }
+
+        return sum;
+    }
+
+    private ErrorSource[] Sources() =>
+    [
+        ErrorSource.Of(ErrorLocation.CzGate, CzGate, 4),
+        new(ErrorLocation.WaitingInLayer, WaitingInLayer, 4),
+        ErrorSource.Of(ErrorLocation.GateOnData, GateOnData, 3),
+        new(ErrorLocation.DataAtom, OnData, 1),
+        new(ErrorLocation.CheckOutsideLayers, OnCheckOutsideLayers, 2),
+        new(ErrorLocation.CheckBetweenLayers, OnCheckBetweenLayers, MovesPerCheck),
+        ErrorSource.Of(ErrorLocation.CheckFlip, CheckFlip, 1),
+        ErrorSource.Of(ErrorLocation.CheckReset, CheckReset, 1),
+        ErrorSource.Of(DataLossTold ? ErrorLocation.ToldLossOfData : ErrorLocation.UntoldLossOfData, DataLossPerSlot, 4),
+        ErrorSource.Of(CheckLossTold ? ErrorLocation.ToldLossOfChecks : ErrorLocation.UntoldLossOfChecks, CheckLossPerSlot, 4),
+    ];
 }
 
 /// <summary>Puts the causes of error at their places.</summary>
 internal struct RoundErrorSum(double roundsBetweenLooks) : IErrorSink
 {
-    private const double MovesPerCheck = 5;
-
     /// <summary>The errors so far.</summary>
     public RoundErrors Errors { get; private set; } = new() { RoundsBetweenLooks = Math.Max(1, (int)Math.Round(roundsBetweenLooks)) };
 
@@ -66,7 +93,7 @@ internal struct RoundErrorSum(double roundsBetweenLooks) : IErrorSink
             // of the errors of a pair four fifths strike the data atom
             ErrorLocation.ExtraCzLayer => Errors with { OnData = Errors.OnData.Then(perRound.Times(0.8)) },
             ErrorLocation.CheckOutsideLayers => Errors with { OnCheckOutsideLayers = Errors.OnCheckOutsideLayers.Then(perRound.Times(0.5)) },
-            ErrorLocation.CheckBetweenLayers => Errors with { OnCheckBetweenLayers = Errors.OnCheckBetweenLayers.Then(perRound.Times(1 / MovesPerCheck)) },
+            ErrorLocation.CheckBetweenLayers => Errors with { OnCheckBetweenLayers = Errors.OnCheckBetweenLayers.Then(perRound.Times(1 / RoundErrors.MovesPerCheck)) },
             ErrorLocation.CheckFlip => Errors with { CheckFlip = Errors.CheckFlip + (probability * (1 - (2 * Errors.CheckFlip))) },
             ErrorLocation.CheckReset => Errors with { CheckReset = probability },
             ErrorLocation.ToldLossOfData => Errors with { DataLossPerSlot = probability, DataLossTold = true },

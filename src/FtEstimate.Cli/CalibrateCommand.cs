@@ -1,0 +1,63 @@
+using System.Collections.Immutable;
+using System.CommandLine;
+using FtEstimate.Files;
+using FtEstimate.Files.Calibration;
+using FtEstimate.Simulation.Calibration;
+
+namespace FtEstimate.Cli;
+
+/// <summary>`calibrate FOLDER`: runs the experiments behind the simulated law, fits it, and writes both into the folder.</summary>
+internal static class CalibrateCommand
+{
+    /// <summary>The command.</summary>
+    public static Command Create()
+    {
+        Argument<string> folder = new("folder") { Description = $"Folder that holds, or gets, {CalibrationTable.FileName} and {FittedLawFile.FileName}" };
+        Option<int> threads = new("--threads") { Description = "Threads; default: one for each processor", DefaultValueFactory = _ => Environment.ProcessorCount };
+        Command command = new("calibrate", "Run the memory experiments behind the simulated law and fit it: what is done already is kept") { folder, threads };
+        command.Validators.Add(result =>
+        {
+            if (result.GetValue(threads) < 1)
+            {
+                result.AddError("--threads: expected at least 1");
+            }
+        });
+        command.SetAction((parsed, cancel) => Task.FromResult(Run(
+            parsed.GetRequiredValue(folder), parsed.GetValue(threads), parsed.InvocationConfiguration.Error, cancel)));
+        return command;
+    }
+
+    private static int Run(string folder, int threads, TextWriter error, CancellationToken cancel)
+    {
+        CalibrationReading reading = CalibrationTable.ReadFile(Path.Combine(folder, CalibrationTable.FileName));
+        if (FaultOutput.Stop(reading.Faults, error))
+        {
+            return ExitStatus.WrongInput;
+        }
+
+        List<CalibrationResult> results = [.. reading.Results];
+        while (results.Count < CalibrationGrid.Cells.Length)
+        {
+            int index = results.Count;
+            CalibrationResult result = CalibrationRun.Run(index, threads, cancel);
+            if (cancel.IsCancellationRequested)
+            {
+                return ExitStatus.Interrupted;
+            }
+
+            results.Add(result);
+            if (FaultOutput.Stop(Faults(CalibrationTable.WriteFile(folder, results)), error))
+            {
+                return ExitStatus.WrongInput;
+            }
+
+            error.WriteLine(FormattableString.Invariant(
+                $"{results.Count} of {CalibrationGrid.Cells.Length}: {result.Cell.Mix}, distance {result.Cell.Distance}, {result.Cell.Basis}: {result.Count.Failures} of {result.Count.Shots}"));
+        }
+
+        FittedLaw law = LawFit.Of([.. results]);
+        return FaultOutput.Stop(Faults(FittedLawFile.Write(folder, law)), error) ? ExitStatus.WrongInput : ExitStatus.Answer;
+    }
+
+    private static ImmutableArray<Fault> Faults(Fault? fault) => fault is null ? [] : [fault];
+}
