@@ -2,6 +2,8 @@ using System.Collections.Immutable;
 using System.CommandLine;
 using FtEstimate.Files;
 using FtEstimate.Files.Calibration;
+using FtEstimate.Reports.Listings;
+using FtEstimate.Reports.Writers;
 using FtEstimate.Simulation.Calibration;
 
 namespace FtEstimate.Cli;
@@ -13,8 +15,9 @@ internal static class CalibrateCommand
     public static Command Create()
     {
         Argument<string> folder = new("folder") { Description = $"Folder that holds, or gets, {CalibrationTable.FileName} and {FittedLawFile.FileName}" };
+        Option<string?> page = new("--page") { Description = "Also write the fit as a Markdown page", HelpName = "FILE" };
         Option<int> threads = new("--threads") { Description = "Threads; default: one for each processor", DefaultValueFactory = _ => Environment.ProcessorCount };
-        Command command = new("calibrate", "Run the memory experiments behind the simulated law and fit it: what is done already is kept") { folder, threads };
+        Command command = new("calibrate", "Run the memory experiments behind the simulated law and fit it: what is done already is kept") { folder, threads, page };
         command.Validators.Add(result =>
         {
             if (result.GetValue(threads) < 1)
@@ -23,11 +26,11 @@ internal static class CalibrateCommand
             }
         });
         command.SetAction((parsed, cancel) => Task.FromResult(Run(
-            parsed.GetRequiredValue(folder), parsed.GetValue(threads), parsed.InvocationConfiguration.Error, cancel)));
+            parsed.GetRequiredValue(folder), parsed.GetValue(threads), parsed.GetValue(page), parsed.InvocationConfiguration.Error, cancel)));
         return command;
     }
 
-    private static int Run(string folder, int threads, TextWriter error, CancellationToken cancel)
+    private static int Run(string folder, int threads, string? page, TextWriter error, CancellationToken cancel)
     {
         CalibrationReading reading = CalibrationTable.ReadFile(Path.Combine(folder, CalibrationTable.FileName));
         if (FaultOutput.Stop(reading.Faults, error))
@@ -56,7 +59,12 @@ internal static class CalibrateCommand
         }
 
         FittedLaw law = LawFit.Of([.. results]);
-        return FaultOutput.Stop(Faults(FittedLawFile.Write(folder, law)), error) ? ExitStatus.WrongInput : ExitStatus.Answer;
+        ImmutableArray<Fault> faults =
+        [
+            .. Faults(FittedLawFile.Write(folder, law)),
+            .. page is null ? [] : Faults(AtomicFile.Write(page, MarkdownWriter.Write(LawReport.Of(law)))),
+        ];
+        return FaultOutput.Stop(faults, error) ? ExitStatus.WrongInput : ExitStatus.Answer;
     }
 
     private static ImmutableArray<Fault> Faults(Fault? fault) => fault is null ? [] : [fault];

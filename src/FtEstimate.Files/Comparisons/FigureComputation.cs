@@ -59,7 +59,7 @@ internal sealed class FigureComputation(string folder)
     private static double SuppressionAtThree(SizedMachine machine)
     {
         NoiseStrength onePatch = machine.Point.At(MachineLoad.SinglePatch).Strength;
-        return PatchError.SuppressionFactor(ScalingLaws.PublishedFit, onePatch, 3);
+        return PatchError.SuppressionFactor(ScalingLaws.Simulated, onePatch, 3);
     }
 
     private static double? OfFactory(string name, double error, string figure)

@@ -15,9 +15,10 @@ public static class CalibrationGrid
     private static readonly double[] MixtureStrengths = [0.2, 0.3, 0.45, 0.6];
     private static readonly double[] AddedStrengths = [0.1, 0.25];
     private static readonly int[] Distances = [3, 5, 7, 9];
-    private static readonly int[] FurtherDistances = [3, 5, 7, 9, 11, 13, 15];
+    private static readonly int[] FurtherDistances = [3, 5, 7, 9, 11, 13];
     private const double AloneStrength = 0.35;
     private const double BaseStrength = 0.25;
+    private const double UniformThreshold = 0.0056;
 
     private static readonly ImmutableArray<Cause> Causes =
     [
@@ -81,12 +82,14 @@ public static class CalibrationGrid
     private static IEnumerable<CalibrationCell> Uniform() =>
         from p in UniformErrors
         from distance in FurtherDistances
+        where WillFail(distance, p / UniformThreshold)
         from cell in BothBases($"uniform {p:0.####}", p, new RoundErrors(), distance)
         select cell;
 
     private static IEnumerable<CalibrationCell> Mixture(string name, RoundErrors errors) =>
         from strength in MixtureStrengths
         from distance in FurtherDistances
+        where WillFail(distance, strength)
         from cell in BothBases($"{name} {strength:0.##}", 0, Taken(errors, strength), distance)
         select cell;
 
@@ -105,6 +108,14 @@ public static class CalibrationGrid
         from cell in BothBases(
             $"{CalibrationCell.AloneMark}{cause.Name} {AloneStrength:0.##}", 0, cause.Add(new RoundErrors(), AloneStrength / cause.NominalWeight), distance)
         select cell;
+
+    /// <summary>Large patches with little noise would not fail once in all their shots.</summary>
+    private static bool WillFail(int distance, double strength) => strength >= distance switch
+    {
+        >= 13 => 0.4,
+        >= 11 => 0.28,
+        _ => 0,
+    };
 
     private static IEnumerable<CalibrationCell> BothBases(FormattableString mix, double uniformError, RoundErrors errors, int distance)
     {

@@ -1,7 +1,5 @@
 using System.Collections.Immutable;
 using FtEstimate.Noise;
-using FtEstimate.Simulation.Circuits;
-using FtEstimate.Simulation.Memory;
 using MathNet.Numerics.LinearAlgebra;
 using MathNet.Numerics.Optimization;
 
@@ -28,9 +26,7 @@ public readonly record struct FitResidual(CalibrationResult Result, double PerRo
 /// <param name="Residuals">One for each experiment with enough failures, fitted or not.</param>
 public sealed record FittedLaw(ImmutableArray<FittedNumber> Numbers, ImmutableArray<FitResidual> Residuals);
 
-/// <summary>
-/// Fits the simulated law and the weights of all causes together: ½·A·x^(γd − δ + η/d) for each basis, with x the sum of weight times rate.
-/// </summary>
+/// <summary>Fits the simulated law and the weights of all causes together: ½·A·x^(γd − δ) for each basis, with x the sum of weight times rate.</summary>
 /// <remarks>
 /// Least squares of ln(error per round); each experiment counts with its own statistical error and with 5 % for the law itself, so that the many exact ones
 /// do not silence the rare ones. Levenberg and Marquardt's method of MathNet.Numerics; weights and scales enter by their logarithms, so none is negative.
@@ -40,67 +36,53 @@ public static class LawFit
     private const double ErrorOfLaw = 0.05;
 
     /// <summary>Fewer failures say next to nothing.</summary>
-    private const int FewestFailures = 10;
+    private const int FewestFailures = 20;
 
-    private static readonly ImmutableArray<string> ShapeNames = ["Prefactor", "DistanceSlope", "ExponentOffset", "InverseDistance", "UniformThreshold"];
-    private static readonly double[] ShapeGuess = [Math.Log(0.05), 0.53, 0.2, 0.1, Math.Log(0.0062)];
-    private static readonly double[] WeightGuess = [92, 107, 107, 34, 22, 5, 13, 5.5, 5, 22, 4, 22, 92, 34, 92];
+    private const int MostIterations = 1000;
+
+    private static readonly ImmutableArray<string> ShapeNames = ["Prefactor", "DistanceSlope", "ExponentOffset", "UniformThreshold"];
+    private static readonly double[] ShapeGuess = [Math.Log(0.07), 0.5, 0.5, Math.Log(0.0065)];
+    private static readonly double[] WeightGuess = [65, 97, 70, 30, 18, 1.1, 5.8, 5.9, 5.8, 15, 5.7, 8, 64, 11, 20];
 
     /// <summary>The fit.</summary>
     public static FittedLaw Of(ImmutableArray<CalibrationResult> results)
     {
-        Row[] rows = [.. results.Where(result => result.Count.Failures >= FewestFailures).Select(result => Row.Of(result))];
-        Vector<double> index = Vector<double>.Build.Dense(rows.Length, i => i);
-        Vector<double> measured = Vector<double>.Build.Dense(rows.Length, i => rows[i].LogPerRound);
-        Vector<double> weight = Vector<double>.Build.Dense(rows.Length, i => 1 / rows[i].Variance);
-        Vector<double> Model(Vector<double> parameters, Vector<double> _) => Vector<double>.Build.Dense(rows.Length, i => rows[i].LogByLaw(parameters));
+        FitRow[] rows = [.. results.Where(result => result.Count.Failures >= FewestFailures).Select(result => FitRow.Of(result, ErrorOfLaw))];
+        FitRow[] fitted = [.. rows.Where(row => row.Result.Cell.IsFitted)];
+        Vector<double> index = Vector<double>.Build.Dense(fitted.Length, i => i);
+        Vector<double> measured = Vector<double>.Build.Dense(fitted.Length, i => fitted[i].LogPerRound);
+        Vector<double> weight = Vector<double>.Build.Dense(fitted.Length, i => 1 / fitted[i].Variance);
+        Vector<double> Model(Vector<double> parameters, Vector<double> _) => Vector<double>.Build.Dense(fitted.Length, i => fitted[i].LogByLaw(parameters));
         IObjectiveModel objective = ObjectiveFunction.NonlinearModel(Model, index, measured, weight);
-        Vector<double> guess = Vector<double>.Build.DenseOfEnumerable(ShapeGuess.Concat(WeightGuess.Select(weight => Math.Log(weight))));
-        NonlinearMinimizationResult fit = new LevenbergMarquardtMinimizer(maximumIterations: 500).FindMinimum(objective, guess);
+        Vector<double> guess = Vector<double>.Build.DenseOfEnumerable(ShapeGuess.Concat(WeightGuess.Select(value => Math.Log(value))));
+        NonlinearMinimizationResult fit = new LevenbergMarquardtMinimizer(maximumIterations: MostIterations).FindMinimum(objective, guess);
         Vector<double> best = fit.MinimizingPoint;
-        return new FittedLaw(
-            [.. Enumerable.Range(0, best.Count).Select(parameter => Number(parameter, best[parameter], fit.StandardErrors[parameter]))],
-            [.. rows.Select(row => new FitResidual(row.Result, Math.Exp(row.LogPerRound) / 2, Math.Exp(row.LogByLaw(best)) / 2))]);
+        ImmutableArray<FitResidual> residuals =
+            [.. rows.Select(row => new FitResidual(row.Result, Math.Exp(row.LogPerRound) / 2, Math.Exp(row.LogByLaw(best)) / 2))];
+        IEnumerable<FittedNumber> numbers = Enumerable.Range(0, best.Count).Select(parameter => Number(parameter, best[parameter], fit.StandardErrors[parameter]));
+        return new FittedLaw([.. numbers, .. Quality(residuals, [.. fitted.Select(row => row.Strength(best))])], residuals);
     }
 
     private static FittedNumber Number(int parameter, double value, double error)
     {
         string name = parameter < ShapeNames.Length ? ShapeNames[parameter] : ((NoiseWeight)(parameter - ShapeNames.Length)).ToString();
-        bool isLogarithm = parameter is not (1 or 2 or 3);
+        bool isLogarithm = parameter is not (FitRow.DistanceSlope or FitRow.ExponentOffset);
         return isLogarithm ? new FittedNumber(name, Math.Exp(value), Math.Exp(value) * error) : new FittedNumber(name, value, error);
     }
 
-    /// <summary>One experiment, with what each weight would contribute if it were 1.</summary>
-    private sealed record Row(CalibrationResult Result, double LogPerRound, double Variance, double[] PerWeight)
+    /// <summary>How good the fit is and how far its data reach.</summary>
+    private static FittedNumber[] Quality(ImmutableArray<FitResidual> all, double[] strengths)
     {
-        public static Row Of(CalibrationResult result)
-        {
-            double perRound = ErrorEstimate.PerShot(result.Count).PerRound(result.Cell.Rounds).Value;
-            return new Row(
-                result,
-                Math.Log(2 * perRound),
-                (1.0 / result.Count.Failures) + (ErrorOfLaw * ErrorOfLaw),
-                [.. Enum.GetValues<NoiseWeight>().Select(weight => Contribution(result.Cell, weight))]);
-        }
-
-        public double LogByLaw(Vector<double> parameters)
-        {
-            double x = Result.Cell.UniformError / Math.Exp(parameters[4]);
-            for (int weight = 0; weight < PerWeight.Length; weight++)
-            {
-                x += PerWeight[weight] * Math.Exp(parameters[ShapeNames.Length + weight]);
-            }
-
-            int distance = Result.Cell.Distance;
-            return parameters[0] + (((parameters[1] * distance) - parameters[2] + (parameters[3] / distance)) * Math.Log(x));
-        }
-
-        private static double Contribution(CalibrationCell cell, NoiseWeight weight)
-        {
-            double[] unit = new double[Enum.GetValues<NoiseWeight>().Length];
-            unit[(int)weight] = 1;
-            NoiseStrength strength = cell.Errors.Strength(new ChannelWeights([.. unit]));
-            return cell.Basis == PauliBasis.X ? strength.X : strength.Z;
-        }
+        FitResidual[] fitted = [.. all.Where(residual => residual.Result.Cell.IsFitted)];
+        return
+        [
+            new("TypicalResidual", Math.Sqrt(fitted.Average(residual => residual.LogRatio * residual.LogRatio)), 0),
+            new("LargestResidual", fitted.Max(residual => Math.Abs(residual.LogRatio)), 0),
+            new("Experiments", fitted.Length, 0),
+            new("Shots", fitted.Sum(residual => (double)residual.Result.Count.Shots), 0),
+            new("LargestDistance", fitted.Max(residual => residual.Result.Cell.Distance), 0),
+            new("SmallestStrength", strengths.Min(), 0),
+            new("LargestStrength", strengths.Max(), 0),
+        ];
     }
 }

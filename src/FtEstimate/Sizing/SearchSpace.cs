@@ -33,7 +33,7 @@ public sealed record SearchSpace(
     /// <param name="scenario">The question; names of law, patch and synthesis are known to exist.</param>
     public static SearchSpace Of(Scenario scenario)
     {
-        IScalingLaw law = ScalingLaws.Named(scenario.Method.Law) ?? ScalingLaws.PublishedFit;
+        IScalingLaw law = ScalingLaws.Named(scenario.Method.Law) ?? ScalingLaws.Simulated;
         PatchLayout patch = PatchLayout.Named(scenario.Method.Patch) ?? PatchLayout.Bare;
         RotationSynthesis synthesis = RotationSynthesis.Named(scenario.Method.Synthesis) ?? RotationSynthesis.RepeatUntilSuccess;
         bool movesAtoms = scenario.Machine.Apparatus is AtomArray { Reach: MovedAtoms };

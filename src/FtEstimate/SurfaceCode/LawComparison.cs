@@ -1,3 +1,4 @@
+using System.Collections.Immutable;
 using FtEstimate.Noise;
 
 namespace FtEstimate.SurfaceCode;
@@ -12,15 +13,14 @@ public sealed record LawComparison(IScalingLaw Other, double UniformError, doubl
     /// <summary>Error by the law in use over that by the other; null where the other says 0.</summary>
     public double? Ratio => OtherPerRound > 0 ? InUsePerRound / OtherPerRound : null;
 
-    /// <summary>The textbook law beside the law in use; the published fit where the textbook law is in use.</summary>
+    /// <summary>Every other law beside the law in use.</summary>
     /// <remarks>A strength is p over the threshold of its law, so the same noise has another strength under another law.</remarks>
-    public static LawComparison Of(IScalingLaw law, NoiseStrength strength, int distance)
-    {
-        IScalingLaw other = law.Name == ScalingLaws.Textbook.Name ? ScalingLaws.PublishedFit : ScalingLaws.Textbook;
-        return new LawComparison(
+    public static ImmutableArray<LawComparison> Of(IScalingLaw law, NoiseStrength strength, int distance) =>
+    [
+        .. ScalingLaws.All.Where(other => other.Name != law.Name).Select(other => new LawComparison(
             other,
             strength.Mean * law.Threshold,
             PatchError.PerRound(law, strength, distance),
-            PatchError.PerRound(other, strength * (law.Threshold / other.Threshold), distance));
-    }
+            PatchError.PerRound(other, strength * (law.Threshold / other.Threshold), distance))),
+    ];
 }

@@ -1,24 +1,28 @@
 using FtEstimate.Noise;
+using FtEstimate.Quantities;
 
 namespace FtEstimate.SurfaceCode;
 
-/// <summary>The law fitted to this project's own Monte Carlo of the memory with exact matching: A·x^(γd − δ + η/d).</summary>
+/// <summary>The law fitted to this project's own Monte Carlo of the memory with exact matching: A·x^(γd − δ).</summary>
 /// <remarks>
-/// Any logical error of one patch in one round. A, γ, δ, η, the threshold of the uniform textbook circuit and the weights of all causes of error were fitted
-/// together (docs/method.md). Any distance from 3 on.
+/// Any logical error of one patch in one round. A, γ, δ, the threshold of the uniform textbook circuit and the weights of all causes of error were fitted
+/// together (docs/method.md). Any distance from 3 on. For x &lt; 1 a larger distance never gives a larger error.
 /// </remarks>
 public sealed class SimulatedLaw : IScalingLaw
 {
     private static readonly double LogPrefactor = Math.Log(FittedNumbers.Value("Prefactor"));
     private static readonly double DistanceSlope = FittedNumbers.Value("DistanceSlope");
     private static readonly double ExponentOffset = FittedNumbers.Value("ExponentOffset");
-    private static readonly double InverseDistance = FittedNumbers.Value("InverseDistance");
+    private static readonly int LargestDistance = (int)FittedNumbers.Value("LargestDistance");
+    private static readonly double SmallestStrength = FittedNumbers.Value("SmallestStrength");
+    private static readonly double LargestStrength = FittedNumbers.Value("LargestStrength");
 
     /// <inheritdoc/>
     public string Name => "simulated";
 
     /// <inheritdoc/>
-    public string Source => "Own Monte Carlo.";
+    public string Source =>
+        $"Fitted to own Monte Carlo of the rotated memory with exact matching: {Show.Significant(FittedNumbers.Value("Experiments"), 3)} experiments at distances 3 to {LargestDistance}.";
 
     /// <inheritdoc/>
     public double Threshold => FittedNumbers.UniformThreshold;
@@ -27,10 +31,19 @@ public sealed class SimulatedLaw : IScalingLaw
     public double LogicalErrorPerRound(double x, int distance)
     {
         ArgumentOutOfRangeException.ThrowIfLessThan(distance, 3);
-        double exponent = (DistanceSlope * distance) - ExponentOffset + (InverseDistance / distance);
-        return Math.Min(0.5, Math.Exp(LogPrefactor + (exponent * Math.Log(x))));
+        return Math.Min(0.5, Math.Exp(LogPrefactor + (((DistanceSlope * distance) - ExponentOffset) * Math.Log(x))));
     }
 
     /// <inheritdoc/>
-    public LawReach Reach(double x, int distance) => new(true, "");
+    public LawReach Reach(double x, int distance)
+    {
+        string quality = $"The fit lies within {Show.Percent(FittedNumbers.Value("TypicalResidual"))} of its experiments typically, {Show.Percent(FittedNumbers.Value("LargestResidual"))} at worst";
+        string range = $"They span distances 3 to {LargestDistance} and strengths {Show.Significant(SmallestStrength, 2)} to {Show.Significant(LargestStrength, 2)}";
+        bool tooFar = distance > LargestDistance;
+        bool tooQuiet = x < SmallestStrength * (1 - Tolerance.Relative);
+        bool tooNoisy = x > LargestStrength * (1 + Tolerance.Relative);
+        return tooFar || tooQuiet || tooNoisy
+            ? new LawReach(false, $"{range}; beyond that the law is extrapolated. {quality} inside.")
+            : new LawReach(true, $"{quality}. {range}.");
+    }
 }

@@ -1,59 +1,63 @@
 using FtEstimate.Noise;
-using FtEstimate.Tests.Cycles;
 
 namespace FtEstimate.Tests.Noise;
 
 public sealed class WeightTests
 {
-    // the weights were fitted at d = 5 and 7 to 9 %; the sum over a uniform circuit at d = 11 must give back p over the threshold
-    [Theory]
-    [InlineData(0.00529)]
-    [InlineData(0.01)]
-    public void Uniform_noise_at_distance_11_gives_error_over_threshold(double threshold)
-    {
-        NoiseStrength strength = ChannelWeights.For(threshold).Uniform(1e-3, 11);
-
-        Assert.Equal(1, strength.X / (1e-3 / threshold), 0.06);
-        Assert.Equal(strength.X, strength.Z);
-    }
-
-    // 1.5 (pz + py) of an even channel is the channel's total, and so is 0.75 (px + pz + 2 py)
     [Fact]
-    public void An_even_channel_counts_with_its_total_in_both_bases()
+    public void Every_cause_counts_and_more_of_it_counts_more() => Assert.All(Enum.GetValues<ErrorLocation>(), location =>
     {
-        ChannelWeights weights = new(1);
+        NoiseStrength once = ChannelWeights.Fitted.Of(ErrorSource.Of(location, 1e-3, 1), 2);
+        NoiseStrength twice = ChannelWeights.Fitted.Of(ErrorSource.Of(location, 2e-3, 1), 2);
 
-        Assert.Equal(23 * 3e-3, weights.DataEvent(PauliChannel.Depolarising(3e-3)).X, 1e-15);
-        Assert.Equal(23 * 3e-3, weights.DataEvent(PauliChannel.Depolarising(3e-3)).Z, 1e-15);
-        Assert.Equal(143 * 3e-3, weights.WaitingPerLayer(PauliChannel.Depolarising(3e-3)).X, 1e-14);
+        Assert.True(once.X > 0 && once.Z > 0, location.ToString());
+        Assert.Equal(2, twice.X / once.X, 1e-12);
+        Assert.Equal(2, twice.Z / once.Z, 1e-12);
+    });
+
+    // the same noise must be as strong a uniform error under any law
+    [Fact]
+    public void Weights_scale_with_the_threshold_of_the_law()
+    {
+        ErrorSource gate = ErrorSource.Of(ErrorLocation.CzGate, 1e-3, 4);
+
+        double asUniform = ChannelWeights.For(0.005).Of(gate, 1).X * 0.005;
+
+        Assert.Equal(asUniform, ChannelWeights.For(0.01).Of(gate, 1).X * 0.01, 1e-15);
+        Assert.Equal(asUniform, ChannelWeights.Fitted.Of(gate, 1).X * FittedNumbers.UniformThreshold, 1e-15);
     }
 
     [Fact]
     public void Phase_errors_of_data_flip_logical_x_only()
     {
-        NoiseStrength strength = new ChannelWeights(1).DataEvent(new PauliChannel(0, 0, 1e-3));
+        NoiseStrength strength = ChannelWeights.Fitted.Of(new ErrorSource(ErrorLocation.DataAtom, new PauliChannel(0, 0, 1e-3), 1), 1);
 
-        Assert.Equal(1.5 * 23e-3, strength.X, 1e-15);
+        Assert.Equal(ChannelWeights.Fitted[NoiseWeight.DataFlip] * 1e-3, strength.X, 1e-15);
         Assert.Equal(0, strength.Z);
     }
 
-    // Baranes 2026 (arXiv:2502.20558), rounded to a hundredth of a percent
+    // in the layers data atoms sit half the time in the Hadamard frame, so neither basis is spared
     [Fact]
-    public void Loss_thresholds_fall_with_the_cube_root_of_the_life()
+    public void Phase_errors_in_layers_load_both_bases_alike()
     {
-        foreach (double[] row in PublishedTable.Rows("loss-thresholds.csv"))
-        {
-            Assert.Equal(row[1], 100 * LossWeights.Threshold(row[0]), 0.005);
-        }
+        NoiseStrength strength = ChannelWeights.Fitted.Of(new ErrorSource(ErrorLocation.WaitingInLayer, new PauliChannel(0, 0, 1e-3), 4), 1);
+
+        Assert.Equal(strength.X, strength.Z);
+        Assert.True(strength.X > 0);
     }
 
-    // thresholds are per gate, losses per atom, and half of the atoms are of each kind: both lost at their threshold together make strength 1
-    [Fact]
-    public void Loss_at_its_threshold_on_both_kinds_is_strength_1()
-    {
-        NoiseStrength data = LossWeights.Told(LossWeights.Threshold(16) / 2, 4);
-        NoiseStrength checks = LossWeights.Told(LossWeights.Threshold(4) / 2, 1);
+    // a lost atom does its harm for longer, the later it is found
+    [Theory]
+    [InlineData(ErrorLocation.ToldLossOfData)]
+    [InlineData(ErrorLocation.UntoldLossOfData)]
+    public void Rarer_looks_make_a_loss_count_more(ErrorLocation loss) => Assert.True(
+        ChannelWeights.Fitted.Of(ErrorSource.Of(loss, 1e-3, 4), 4).X > ChannelWeights.Fitted.Of(ErrorSource.Of(loss, 1e-3, 4), 1).X);
 
-        Assert.Equal(1, (data + checks).Mean, 1e-12);
+    // Wu 2022 (arXiv:2201.03540): located erasures are milder than unlocated errors, 4.15 % against 0.94 %
+    [Fact]
+    public void A_loss_that_is_told_counts_less_than_one_that_is_not()
+    {
+        Assert.True(ChannelWeights.Fitted[NoiseWeight.ToldLossOfData] < ChannelWeights.Fitted[NoiseWeight.UntoldLossOfData]);
+        Assert.True(ChannelWeights.Fitted[NoiseWeight.ToldLossOfChecks] < ChannelWeights.Fitted[NoiseWeight.UntoldLossOfChecks]);
     }
 }

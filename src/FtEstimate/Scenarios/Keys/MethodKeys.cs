@@ -12,7 +12,7 @@ public static class MethodKeys
         "law",
         ValueKind.Text,
         "The law from physical to logical errors.",
-        DefaultText: "published-fit",
+        DefaultText: "simulated",
         Choices: [.. ScalingLaws.All.Select(law => law.Name)]);
 
     /// <summary>Atoms per tile.</summary>
