@@ -20,7 +20,7 @@ internal static class CalibrateCommand
         Command command = new("calibrate", "Run the memory experiments behind the simulated law and fit it: what is done already is kept") { folder, threads, page };
         command.Validators.Add(result =>
         {
-            if (result.GetValue(threads) < 1)
+            if (result.GetResult(threads) is { Implicit: false } && result.GetValue(threads) < 1)
             {
                 result.AddError("--threads: expected at least 1");
             }

@@ -1,4 +1,5 @@
 using System.Collections.Immutable;
+using System.Globalization;
 using FtEstimate.Noise;
 using FtEstimate.Quantities;
 using FtEstimate.Reports.Documents;
@@ -56,7 +57,7 @@ public static class LawReport
         {
             if (belongs(number.Name))
             {
-                table.Add(number.Name, Show.Significant(number.Value, 4), number.StandardError > 0 ? Show.Significant(number.StandardError, 2) : "");
+                table.Add(number.Name, Value(number.Value), number.StandardError > 0 ? Show.Significant(number.StandardError, 2) : "");
             }
         }
 
@@ -72,7 +73,7 @@ public static class LawReport
             FitResidual worst = group.MaxBy(residual => Math.Abs(residual.LogRatio));
             table.Add(
                 group.Key,
-                Show.Significant(group.Count(), 3),
+                Value(group.Count()),
                 Deviation(Math.Sqrt(group.Average(residual => residual.LogRatio * residual.LogRatio))),
                 Deviation(group.Average(residual => residual.LogRatio)),
                 FormattableString.Invariant($"{Deviation(worst.LogRatio)} at d = {worst.Result.Cell.Distance}, {worst.Result.Cell.Basis}"));
@@ -81,5 +82,8 @@ public static class LawReport
         return table.Build();
     }
 
-    private static string Deviation(double logRatio) => logRatio.ToString("0.00;−0.00;0.00", System.Globalization.CultureInfo.InvariantCulture);
+    private static string Value(double value) =>
+        value == Math.Floor(value) && value < 1e6 ? value.ToString("N0", CultureInfo.InvariantCulture) : Show.Significant(value, 4);
+
+    private static string Deviation(double logRatio) => logRatio.ToString("0.00;−0.00;0.00", CultureInfo.InvariantCulture);
 }

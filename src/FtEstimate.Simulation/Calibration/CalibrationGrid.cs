@@ -20,6 +20,10 @@ public static class CalibrationGrid
     private const double BaseStrength = 0.25;
     private const double UniformThreshold = 0.0056;
 
+    /// <summary>Shots with told losses take several times as long.</summary>
+    private const int LargestWithLosses = 11;
+
+
     private static readonly ImmutableArray<Cause> Causes =
     [
         new("cz", 92, (e, p) => e with { CzGate = e.CzGate + p }, Alone: true),
@@ -75,7 +79,12 @@ public static class CalibrationGrid
     /// <summary>All experiments, cheap ones first.</summary>
     public static ImmutableArray<CalibrationCell> Cells { get; } =
     [
-        .. Uniform().Concat(Mixture("gates", Gates)).Concat(Mixture("waiting", Waiting)).Concat(Mixture("losses", Losses)).Concat(Added()).Concat(Alone())
+        .. Uniform()
+            .Concat(Mixture("gates", Gates))
+            .Concat(Mixture("waiting", Waiting))
+            .Concat(Mixture("losses", Losses).Where(cell => cell.Distance <= LargestWithLosses))
+            .Concat(Added())
+            .Concat(Alone())
             .OrderBy(cell => cell.Distance),
     ];
 
