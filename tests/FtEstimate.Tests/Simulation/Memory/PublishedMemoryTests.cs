@@ -12,10 +12,10 @@ public sealed class PublishedMemoryTests(ITestOutputHelper output)
     /// <summary>Rows below this error per round take too long.</summary>
     private const double SmallestPerRound = 1e-6;
 
-    // of 46 rows one in 50 runs would have one beyond 3.5 standard errors by chance; seeds are fixed
+    // 44 comparisons: one in 50 runs would have one beyond 3.5 standard errors by chance; seeds are fixed
     private const double WidestRow = 3.5;
 
-    // 92 degrees of freedom or so would leave 1.5 once in a thousand runs
+    // for the 34 of the first kind one run in 30 would exceed 1.5 by chance
     private const double WidestMean = 1.5;
 
     [Theory]
@@ -43,7 +43,7 @@ public sealed class PublishedMemoryTests(ITestOutputHelper output)
     [InlineData("SI")]
     public void Rows_of_distance_3_are_met(string noise) => AssertMet(noise, distance => distance == 3);
 
-    // measured, see the bounds: union-find loses more the larger the distance and the smaller the error
+    // measured: 1.07, 1.13, 1.24 and 1.23; it loses more the larger the distance
     [Theory]
     [Trait("Category", "Long")]
     [InlineData(0.001, 5, 1_000_000)]
@@ -57,7 +57,7 @@ public sealed class PublishedMemoryTests(ITestOutputHelper output)
         ShotCount unionFind = Shots.Run(circuit, shots, DecoderKind.UnionFind);
         output.WriteLine(FormattableString.Invariant($"p {error} d {distance}: union-find/matching = {unionFind.Rate() / matching.Rate():F3}"));
 
-        Assert.InRange(unionFind.Rate() / matching.Rate(), 1, 2);
+        Assert.InRange(unionFind.Rate() / matching.Rate(), 1, 1.5);
     }
 
     private void AssertMet(string noise, Predicate<int> distances)
@@ -99,12 +99,14 @@ public sealed class PublishedMemoryTests(ITestOutputHelper output)
         return ((count.Rate() - published) / sigma, count, count.Rate() / published);
     }
 
-    /// <summary>Enough for 1500 failures, but no more than takes some seconds: the work of a shot goes with its errors.</summary>
+    /// <summary>Enough for many failures, but no more than takes some seconds: the work of a shot goes with its errors. At least what makes sigma a measure.</summary>
     private static long ShotsFor(PublishedMemoryRow row)
     {
-        const double Failures = 1500;
-        const double WorkOfARow = 6e6;
+        const double Failures = 2000;
+        const double FewestFailures = 15;
+        const double WorkOfARow = 2e7;
         double errorsOfAShot = 3 * Math.Pow(row.Distance, 3) * row.Error * 15;
-        return (long)Math.Min(Failures * row.ShotsX / row.FailuresX, WorkOfARow / (0.3 + errorsOfAShot));
+        double perFailure = row.ShotsX / row.FailuresX;
+        return (long)Math.Max(FewestFailures * perFailure, Math.Min(Failures * perFailure, WorkOfARow / (0.3 + errorsOfAShot)));
     }
 }
