@@ -34,6 +34,8 @@ public sealed record UniformNoise(
 /// </remarks>
 public static class TextbookCircuit
 {
+    private const int NoAtom = -1;
+
     private static readonly ImmutableArray<Corner> OrderX = [Corner.NorthEast, Corner.NorthWest, Corner.SouthEast, Corner.SouthWest];
     private static readonly ImmutableArray<Corner> OrderZ = [Corner.NorthEast, Corner.SouthEast, Corner.NorthWest, Corner.SouthWest];
 
@@ -42,7 +44,10 @@ public static class TextbookCircuit
     /// <param name="rounds">Rounds, at least 1.</param>
     /// <param name="basis">Basis of preparation and reading.</param>
     /// <param name="noise">Error rates.</param>
-    public static Circuit Of(int distance, int rounds, PauliBasis basis, UniformNoise noise)
+    public static Circuit Of(int distance, int rounds, PauliBasis basis, UniformNoise noise) => Of(distance, rounds, basis, noise, NoAtom);
+
+    /// <summary>The same, where one data atom has no noise while checks are read: reference values of another implementation are of that kind.</summary>
+    internal static Circuit Of(int distance, int rounds, PauliBasis basis, UniformNoise noise, int atomThatDoesNotWait)
     {
         ArgumentOutOfRangeException.ThrowIfLessThan(rounds, 1);
         RotatedPatch patch = new(distance);
@@ -63,7 +68,7 @@ public static class TextbookCircuit
             }
 
             TurnLayer(builder, patch, noise);
-            ReadLayer(builder, patch, noise, resetAgain: round < rounds - 1);
+            ReadLayer(builder, patch, noise, atomThatDoesNotWait, resetAgain: round < rounds - 1);
         }
 
         builder.ReadData(noise.ReadoutFlip);
@@ -131,7 +136,7 @@ public static class TextbookCircuit
         builder.EndLayer();
     }
 
-    private static void ReadLayer(MemoryCircuitBuilder builder, RotatedPatch patch, UniformNoise noise, bool resetAgain)
+    private static void ReadLayer(MemoryCircuitBuilder builder, RotatedPatch patch, UniformNoise noise, int atomThatDoesNotWait, bool resetAgain)
     {
         for (int check = 0; check < patch.Checks.Length; check++)
         {
@@ -141,7 +146,7 @@ public static class TextbookCircuit
 
         for (int atom = 0; atom < patch.DataCount; atom++)
         {
-            builder.Noise(atom, PauliChannel.Depolarising(noise.WaitingInReadout));
+            builder.Noise(atom, PauliChannel.Depolarising(atom == atomThatDoesNotWait ? 0 : noise.WaitingInReadout));
         }
 
         if (resetAgain)
