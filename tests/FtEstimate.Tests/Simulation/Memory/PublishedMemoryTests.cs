@@ -114,14 +114,12 @@ public sealed class PublishedMemoryTests(ITestOutputHelper output)
         return ((count.Rate() - published) / sigma, count, count.Rate() / published);
     }
 
-    /// <summary>Enough for many failures, but no more than takes some seconds: the work of a shot goes with its errors. At least what makes sigma a measure.</summary>
+    /// <summary>Enough for 1500 failures, but no more than takes some seconds: the work of a shot goes with its errors.</summary>
     private static long ShotsFor(PublishedMemoryRow row)
     {
-        const double Failures = 2000;
-        const double FewestFailures = 8;
-        const double WorkOfARow = 8e6;
+        const double Failures = 1500;
+        const double WorkOfARow = 6e6;
         double errorsOfAShot = 3 * Math.Pow(row.Distance, 3) * row.Error * 15;
-        double perFailure = row.ShotsX / row.FailuresX;
-        return (long)Math.Max(FewestFailures * perFailure, Math.Min(Failures * perFailure, WorkOfARow / (0.3 + errorsOfAShot)));
+        return (long)Math.Min(Failures * row.ShotsX / row.FailuresX, WorkOfARow / (0.3 + errorsOfAShot));
     }
 }
