@@ -89,6 +89,7 @@ public static class AtomCircuit
                 builder.Noise(builder.CheckAtom(check), MemoryCircuitBuilder.FlipOf(PauliBasis.Z, errors.CheckReset));
             }
 
+            builder.EndLayer();
             TurnChecks();
             for (int layer = 0; layer < Layers; layer++)
             {

@@ -37,9 +37,14 @@ internal sealed class MechanismTable
         return index;
     }
 
-    /// <summary>Adds an independent cause of a symptom.</summary>
+    /// <summary>Adds an independent cause of a symptom; one that never happens makes no mechanism.</summary>
     public void Add(Symptom symptom, double probability)
     {
+        if (probability == 0)
+        {
+            return;
+        }
+
         int index = IndexOf(symptom);
         if (index >= 0)
         {
