@@ -53,7 +53,7 @@ internal sealed class MemoryArguments(List<Fault> faults)
             return (long)value;
         }
 
-        Add(option, string.Create(CultureInfo.InvariantCulture, $"expected a whole number from {low} to {Show.Significant(high, 5)}, found '{text}'"));
+        Add(option, string.Create(CultureInfo.InvariantCulture, $"expected a whole number from {low} to {(high < MostShots ? high : Show.Significant(high, 1))}, found '{text}'"));
         return standard;
     }
 

@@ -71,7 +71,7 @@ public static class CountsFile
         return
         [
             .. there.Keys.Union(here.Keys).Where(name => there.GetValueOrDefault(name, "none") != here.GetValueOrDefault(name, "none"))
-                .Select(name => $"{name} is {there.GetValueOrDefault(name, "none")} there and {here.GetValueOrDefault(name, "none")} here"),
+                .Select(name => $"{name}: {there.GetValueOrDefault(name, "none")} there, {here.GetValueOrDefault(name, "none")} here"),
         ];
     }
 

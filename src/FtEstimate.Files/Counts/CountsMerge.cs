@@ -40,7 +40,7 @@ public static class CountsMerge
         ImmutableArray<string> differences = CountsFile.Differences(counts.Question, asked);
         if (counts.Shard != shard)
         {
-            differences = differences.Add($"shard is {ShardText.Of(counts.Shard)} there and {ShardText.Of(shard)} here");
+            differences = differences.Add($"shard: {ShardText.Of(counts.Shard)} there, {ShardText.Of(shard)} here");
         }
 
         return differences.IsEmpty ? [] : [OtherQuestion(path, "the counts answer another question", differences)];

@@ -35,7 +35,7 @@ internal static class MemorySummary
 
         return results.Distances.LastOrDefault(distance => distance.Measured is not null) is { Measured: { } rate } largest
             ? $"At distance {Words.Whole(largest.Distance)} the error per round is {MemoryText.WithError(rate)}; the law {results.Origin.LawName} says {Show.Significant(largest.Law, 2)}."
-            : "No experiment gives an error per round: failures are too few, or one shot in two fails. Its bounds are below.";
+            : "No experiment gives an error per round: failures are too few, or half the shots fail. The intervals below bound it.";
     }
 
     private static string WhyNotAll(MemoryResults results) => results.Shards is [{ Count: > 1 } only]

@@ -8,8 +8,11 @@ namespace FtEstimate.Reports.Memory;
 /// <summary>Measured numbers as text.</summary>
 internal static class MemoryText
 {
-    /// <summary>Instead of a ratio or rate that failures cannot carry.</summary>
-    public const string TooFew = "not enough failures";
+    /// <summary>A rate or ratio, or why there is none.</summary>
+    /// <param name="measured">The value.</param>
+    /// <param name="saturates">Whether half of the shots may fail.</param>
+    public static string Measured(MeasuredRate? measured, bool saturates) =>
+        measured is { } some ? WithError(some) : saturates ? "half the shots may fail" : "not enough failures";
 
     /// <summary>A value above 0 and its standard error, both to the digits the error leaves: "3.82 ± 0.05", "(3.2 ± 0.6)e-5".</summary>
     public static string WithError(MeasuredRate rate)

@@ -15,7 +15,7 @@ internal static class MemoryPicture
     private const int Height = 430;
 
     // the two bases stand side by side
-    private const double Aside = 0.12;
+    private const double Aside = 0.06;
 
     // a rate too small to matter is left out rather than stretching the axis
     private const double SmallestDrawn = 1e-30;

@@ -18,12 +18,18 @@ public sealed record ExperimentResult(MemorySetting Setting, ShotCount Count, do
     /// <summary>The same per round.</summary>
     public ErrorEstimate? PerRound => PerShot?.PerRound(Setting.Rounds);
 
-    /// <summary>Error per round with its standard error; null with few failures, or at a failure probability of one half, where the rounds no longer show.</summary>
+    /// <summary>Whether half of the shots may fail: then what one round adds no longer shows.</summary>
+    public bool Saturates => Count.Failures >= FewestFailures && Count.Failures >= NeverSaturates * Count.Shots && PerShot is { High: >= 0.5 };
+
+    // with ten failures or more in as many times ten shots the interval ends below 0.18, and need not be worked out
+    private const double NeverSaturates = 0.1;
+
+    /// <summary>Error per round with its standard error; null with few failures, or where half of the shots may fail.</summary>
     public MeasuredRate? Rate
     {
         get
         {
-            if (Count.Failures < FewestFailures || 2 * Count.Failures >= Count.Shots)
+            if (Count.Failures < FewestFailures || Saturates)
             {
                 return null;
             }

@@ -40,6 +40,9 @@ public sealed record MemoryResults(
     /// <summary>Whether every shot asked for was run.</summary>
     public bool IsWhole => Experiments.All(experiment => experiment.Count.Shots == Question.Shots);
 
+    /// <summary>Whether half of the shots may fail in an experiment at this distance.</summary>
+    public bool Saturates(int distance) => Experiments.Any(experiment => experiment.Setting.Distance == distance && experiment.Saturates);
+
     /// <summary>Adds up shards of one question and holds the sum against the law.</summary>
     /// <param name="shards">At least one, of one question, without blocks in common.</param>
     public static MemoryResults Of(ImmutableArray<MemoryCounts> shards)
