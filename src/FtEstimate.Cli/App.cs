@@ -10,8 +10,9 @@ public static class App
     /// <param name="args">The words after the program's name.</param>
     /// <param name="output">Where reports go.</param>
     /// <param name="error">Where faults and progress go.</param>
+    /// <param name="cancel">Interrupts what can be interrupted, like a signal.</param>
     /// <returns>0 an answer, 2 wrong input, 3 no machine meets the goal, 130 interrupted.</returns>
-    public static async Task<int> RunAsync(IReadOnlyList<string> args, TextWriter output, TextWriter error)
+    public static async Task<int> RunAsync(IReadOnlyList<string> args, TextWriter output, TextWriter error, CancellationToken cancel = default)
     {
         RootCommand root = new(
             "FtEstimate: from bench numbers of a neutral-atom machine to the atoms and the time a fault-tolerant run needs.")
@@ -19,6 +20,7 @@ public static class App
             ReportCommand.Create(),
             WorkloadCommand.Create(),
             FactoriesCommand.Create(),
+            MemoryCommand.Create(),
             ValidationCommand.Create(),
             CalibrateCommand.Create(),
         };
@@ -33,10 +35,18 @@ public static class App
 
         // what is said about a wrong command line is no report
         bool isWrong = parsed.Action is ParseErrorAction;
-        InvocationConfiguration io = new() { Output = isWrong ? error : output, Error = error, EnableDefaultExceptionHandler = false };
+        InvocationConfiguration io = new()
+        {
+            Output = isWrong ? error : output,
+            Error = error,
+            EnableDefaultExceptionHandler = false,
+
+            // the one command that runs long finishes its blocks, however long they take
+            ProcessTerminationTimeout = null,
+        };
         try
         {
-            int status = await parsed.InvokeAsync(io).ConfigureAwait(false);
+            int status = await parsed.InvokeAsync(io, cancel).ConfigureAwait(false);
             return isWrong ? ExitStatus.WrongInput : status;
         }
         catch (OperationCanceledException)

@@ -7,7 +7,8 @@ namespace FtEstimate.Cli;
 /// <param name="Markdown">File of the Markdown; null: standard output.</param>
 /// <param name="Page">File of the page; null: none.</param>
 /// <param name="Figures">File of the figures; null: none.</param>
-internal sealed record OutputPlaces(string? Markdown, string? Page, string? Figures)
+/// <param name="Counts">File of the counts of a simulation; null: none.</param>
+internal sealed record OutputPlaces(string? Markdown, string? Page, string? Figures, string? Counts = null)
 {
     /// <summary>What is wrong with the places, found before anything is computed or written.</summary>
     /// <param name="inputs">The files that were read: no output replaces them.</param>
@@ -16,7 +17,7 @@ internal sealed record OutputPlaces(string? Markdown, string? Page, string? Figu
         var faults = ImmutableArray.CreateBuilder<Fault>();
         HashSet<string> inputPaths = [.. inputs.Where(AtomicFile.IsFileName).Select(Path.GetFullPath)];
         HashSet<string> outputPaths = [];
-        foreach (string path in new[] { Markdown, Page, Figures }.OfType<string>())
+        foreach (string path in new[] { Counts, Markdown, Page, Figures }.OfType<string>())
         {
             if (AtomicFile.FaultOfPlace(path) is { } fault)
             {

@@ -5,6 +5,7 @@ using System.Text.Encodings.Web;
 using System.Text.Json;
 using FtEstimate.MagicStates;
 using FtEstimate.Reports.Listings;
+using FtEstimate.Simulation.Memory;
 using FtEstimate.Sizing;
 using FtEstimate.Workloads;
 
@@ -31,6 +32,9 @@ public static class JsonFigures
     /// <summary>Of a catalogue of factories.</summary>
     public static string Of(FactoryQuestion question, ImmutableArray<CatalogueEntry> entries) =>
         Written(json => CatalogueFigures.Write(json, question, entries));
+
+    /// <summary>Of simulated memory experiments.</summary>
+    public static string Of(MemoryResults results) => Written(json => MemoryFigures.Write(json, results));
 
     private static string Written(Action<Utf8JsonWriter> write)
     {

@@ -1,5 +1,5 @@
 using FtEstimate.SurfaceCode;
-using MathNet.Numerics.Distributions;
+using MathNet.Numerics;
 
 namespace FtEstimate.Simulation.Memory;
 
@@ -15,12 +15,30 @@ public readonly record struct ErrorEstimate(double Value, double Low, double Hig
     /// <param name="count">At least one shot.</param>
     public static ErrorEstimate PerShot(ShotCount count) => new(
         (double)count.Failures / count.Shots,
-        count.Failures == 0 ? 0 : Beta.InvCDF(count.Failures, count.Shots - count.Failures + 1, OutsideEachEnd),
-        count.Failures == count.Shots ? 1 : Beta.InvCDF(count.Failures + 1, count.Shots - count.Failures, 1 - OutsideEachEnd));
+        count.Failures == 0 ? 0 : Quantile(count.Failures, count.Shots - count.Failures + 1, OutsideEachEnd),
+        count.Failures == count.Shots ? 1 : Quantile(count.Failures + 1, count.Shots - count.Failures, 1 - OutsideEachEnd));
 
     /// <summary>Per round, where this is per shot: ½[1 − (1 − 2P)^{1/r}]; anything above one half counts as one half.</summary>
     public ErrorEstimate PerRound(int rounds) => new(
         MemoryError.PerRound(Math.Min(Value, 0.5), rounds),
         MemoryError.PerRound(Math.Min(Low, 0.5), rounds),
         MemoryError.PerRound(Math.Min(High, 0.5), rounds));
+
+    // halving the logarithm keeps the digits of small probabilities, which a search on the number itself to a fixed accuracy loses
+    private static double Quantile(double a, double b, double probability)
+    {
+        const double SmallestLogarithm = -700;
+        const int Halvings = 64;
+        double low = SmallestLogarithm;
+        double high = 0;
+        for (int i = 0; i < Halvings; i++)
+        {
+            double middle = (low + high) / 2;
+            bool isBelow = SpecialFunctions.BetaRegularized(a, b, Math.Exp(middle)) < probability;
+            low = isBelow ? middle : low;
+            high = isBelow ? high : middle;
+        }
+
+        return Math.Exp((low + high) / 2);
+    }
 }

@@ -43,7 +43,10 @@ public readonly record struct MemoryTally(long BlocksDone, ShotCount Count);
 /// <summary>Runs memory experiments on several threads.</summary>
 public static class MemoryRun
 {
-    /// <summary>Blocks between two looks at the relative error; the number of blocks at each look does not depend on the threads.</summary>
+    /// <summary>Part of every counts file: raised whenever the same question with the same seed may give other counts.</summary>
+    public const int Version = 1;
+
+    /// <summary>Blocks before the first look at the relative error, doubled from look to look, so that neither threads nor interruptions move the end.</summary>
     private const long FirstLook = 64;
 
     /// <summary>Runs a shard from where it stands to its end, to the wanted accuracy, or to the interruption; blocks begun are finished.</summary>
@@ -59,7 +62,7 @@ public static class MemoryRun
     {
         Worker[] workers = [.. Enumerable.Range(0, threads).Select(_ => new Worker(experiment, plan))];
         MemoryTally tally = from;
-        while (tally.BlocksDone < plan.BlocksOfShard && !cancel.IsCancellationRequested && !IsAccurate(tally.Count, plan.RelativeError))
+        while (!IsDone(plan, tally) && !cancel.IsCancellationRequested)
         {
             long end = plan.RelativeError > 0 ? Math.Min(NextLook(tally.BlocksDone), plan.BlocksOfShard) : plan.BlocksOfShard;
             tally = RunTo(end, workers, tally, progress, cancel);
@@ -68,9 +71,15 @@ public static class MemoryRun
         return tally;
     }
 
+    /// <summary>Whether a shard is at its end, or was accurate enough when it was last looked at.</summary>
+    public static bool IsDone(MemoryPlan plan, MemoryTally tally) =>
+        tally.BlocksDone >= plan.BlocksOfShard || (IsLook(tally.BlocksDone) && IsAccurate(tally.Count, plan.RelativeError));
+
     /// <summary>Whether the standard error of the failure rate is small enough.</summary>
     public static bool IsAccurate(ShotCount count, double relativeError) =>
         relativeError > 0 && count.Failures * relativeError * relativeError >= 1 - ((double)count.Failures / Math.Max(count.Shots, 1));
+
+    private static bool IsLook(long done) => done >= FirstLook && done % FirstLook == 0 && long.IsPow2(done / FirstLook);
 
     private static long NextLook(long done)
     {

@@ -10,13 +10,14 @@ public sealed class CommandLineTests
         CommandRun run = await CommandRun.Of();
 
         Assert.Equal((ExitStatus.Answer, ""), (run.Status, run.Error));
-        Assert.All((string[])["report", "workload", "factories"], name => Assert.Contains($"\n  {name} ", run.Output.ReplaceLineEndings("\n"), StringComparison.Ordinal));
+        Assert.All((string[])["report", "workload", "factories", "memory"], name => Assert.Contains($"\n  {name} ", run.Output.ReplaceLineEndings("\n"), StringComparison.Ordinal));
     }
 
     [Theory]
     [InlineData("report")]
     [InlineData("workload")]
     [InlineData("factories")]
+    [InlineData("memory")]
     public async Task Every_command_explains_itself(string command)
     {
         CommandRun run = await CommandRun.Of(command, "--help");
