@@ -29,6 +29,7 @@ internal sealed class FigureComputation(string folder)
                 RequiredDistance.For(law, PatchError.Uniform(law, error), target),
             "law" when Numbers(parts[1..]) is [var error, >= 3 and var distance] && ScalingLaws.Named(parts[0]) is { } law =>
                 PatchError.PerRound(law, PatchError.Uniform(law, error), (int)distance),
+            "memory" when Numbers(parts[1..]) is [var error, >= 3 and var distance] => MemoryFigure.PerRound(parts[0], error, (int)distance),
             "factoring" when Numbers(parts) is [>= 2 and var bits] => OfWorkload(new Factoring((int)bits).Workload(), figure.Figure),
             "rotation" when Numbers(parts[1..]) is [var error] => RotationSynthesis.Named(parts[0])?.TPerRotation(error),
             "move" when Numbers(parts[1..]) is [var acceleration, var micrometres] => OfMove(parts[0], acceleration, micrometres * 1e-6),
@@ -52,6 +53,7 @@ internal sealed class FigureComputation(string folder)
             "round_s" => machine?.Clock.RoundSeconds,
             "code_distance" => machine?.Distance,
             "suppression_3_to_5" when machine is not null => SuppressionAtThree(machine),
+            "simulated_suppression_3_to_5" when machine is not null => MemoryFigure.SuppressionFromThree(machine),
             _ => null,
         };
     }

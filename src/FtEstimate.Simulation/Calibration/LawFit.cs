@@ -40,6 +40,9 @@ public static class LawFit
 
     private const int MostIterations = 1000;
 
+    /// <summary>As close to the best fit as the derivatives, which are differences, allow.</summary>
+    private const double Tolerance = 1e-15;
+
     private static readonly ImmutableArray<string> ShapeNames = ["Prefactor", "DistanceSlope", "ExponentOffset", "UniformThreshold"];
     private static readonly double[] ShapeGuess = [Math.Log(0.07), 0.5, 0.5, Math.Log(0.0065)];
     private static readonly double[] WeightGuess = [65, 97, 70, 30, 18, 1.1, 5.8, 5.9, 5.8, 15, 5.7, 8, 64, 11, 20];
@@ -55,7 +58,8 @@ public static class LawFit
         Vector<double> Model(Vector<double> parameters, Vector<double> _) => Vector<double>.Build.Dense(fitted.Length, i => fitted[i].LogByLaw(parameters));
         IObjectiveModel objective = ObjectiveFunction.NonlinearModel(Model, index, measured, weight);
         Vector<double> guess = Vector<double>.Build.DenseOfEnumerable(ShapeGuess.Concat(WeightGuess.Select(value => Math.Log(value))));
-        NonlinearMinimizationResult fit = new LevenbergMarquardtMinimizer(maximumIterations: MostIterations).FindMinimum(objective, guess);
+        NonlinearMinimizationResult fit = new LevenbergMarquardtMinimizer(
+            gradientTolerance: Tolerance, stepTolerance: Tolerance, functionTolerance: Tolerance, maximumIterations: MostIterations).FindMinimum(objective, guess);
         Vector<double> best = fit.MinimizingPoint;
         ImmutableArray<FitResidual> residuals =
             [.. rows.Select(row => new FitResidual(row.Result, Math.Exp(row.LogPerRound) / 2, Math.Exp(row.LogByLaw(best)) / 2))];

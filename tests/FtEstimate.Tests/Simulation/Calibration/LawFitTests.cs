@@ -66,7 +66,7 @@ public sealed class LawFitTests
     [Fact]
     public void The_fit_finds_the_law_that_made_the_data()
     {
-        double[] weights = [.. Enum.GetValues<NoiseWeight>().Select(weight => 20.0 + (3 * (int)weight))];
+        double[] weights = [.. Enum.GetValues<NoiseWeight>().Select(weight => ChannelWeights.Fitted[weight] * ((int)weight % 2 == 0 ? 1.1 : 0.8))];
         ImmutableArray<CalibrationResult> made = [.. CalibrationGrid.Cells.Select(cell => Made(cell, new ChannelWeights([.. weights])))];
 
         FittedLaw law = LawFit.Of(made);
