@@ -13,14 +13,13 @@ internal sealed class NoiseLadder
     public NoiseLadder(Func<double, MemoryModel> modelAt, LadderPlan plan)
     {
         MemoryModel target = modelAt(plan.Target);
-        StartModel = modelAt(plan.Start);
         DecoderGraph = target.Graph;
         Order = [.. Enumerable.Range(0, DecoderGraph.Edges.Length)
             .Where(edge => DecoderGraph.Edges[edge].Probability > 0)
             .OrderBy(edge => DecoderGraph.Edges[edge].MeetsBoundary
                 ? DecoderGraph.Edges[edge].A
                 : Math.Min(DecoderGraph.Edges[edge].A, DecoderGraph.Edges[edge].B))];
-        List<NoiseLevel> levels = [LevelOf(plan.Start, StartModel)];
+        List<NoiseLevel> levels = [LevelOf(plan.Start, modelAt(plan.Start))];
         while (levels[^1].Noise > plan.Target)
         {
             double next = levels[^1].Noise * Math.Pow(2, -1 / Math.Sqrt(Math.Max(levels[^1].ExpectedFaults, FewestFaults)));
@@ -29,6 +28,7 @@ internal sealed class NoiseLadder
 
         Levels = [.. levels];
         Rank = new int[DecoderGraph.Edges.Length];
+        Array.Fill(Rank, -1);
         for (int rank = 0; rank < Order.Length; rank++)
         {
             Rank[Order[rank]] = rank;
@@ -38,16 +38,13 @@ internal sealed class NoiseLadder
     /// <summary>Levels, most noise first.</summary>
     public NoiseLevel[] Levels { get; }
 
-    /// <summary>The experiment at the first level.</summary>
-    public MemoryModel StartModel { get; }
-
     /// <summary>Graph with the probabilities of the target: the decoder uses its weights at all levels, else the failing sets would differ.</summary>
     public DetectorGraph DecoderGraph { get; }
 
     /// <summary>Edges that can happen, by their lowest detector: neighbours in space and time are close.</summary>
     public int[] Order { get; }
 
-    /// <summary>Place of each edge in <see cref="Order"/>.</summary>
+    /// <summary>Place of each edge in <see cref="Order"/>; −1 for those that cannot happen.</summary>
     public int[] Rank { get; }
 
     private NoiseLevel LevelOf(double noise, MemoryModel model)

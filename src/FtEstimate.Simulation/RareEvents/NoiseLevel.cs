@@ -40,13 +40,13 @@ internal sealed class NoiseLevel
     /// <summary>Sum of −ln(1−p) over the mechanisms before each rank; the last entry is that of all.</summary>
     public double[] HazardBefore { get; }
 
-    /// <summary>−ln(1−p) summed over all mechanisms.</summary>
-    public double Hazard => HazardBefore[^1];
+    /// <summary>−ln(1−p) of the mechanism of a rank; 0 for those that cannot happen, which have none.</summary>
+    public double HazardOf(int rank) => rank < 0 ? 0 : HazardBefore[rank + 1] - HazardBefore[rank];
 
     /// <summary>ln of the probability that these mechanisms happen and no others.</summary>
     public double LogProbabilityOf(ReadOnlySpan<int> faults)
     {
-        double sum = -Hazard;
+        double sum = -HazardBefore[^1];
         foreach (int edge in faults)
         {
             sum += logOdds[edge];
@@ -56,7 +56,7 @@ internal sealed class NoiseLevel
     }
 
     /// <summary>Rank of the mechanism under a point of the summed hazard.</summary>
-    /// <param name="point">0 to below <see cref="Hazard"/>.</param>
+    /// <param name="point">0 to below the sum over all.</param>
     public int RankAt(double point)
     {
         int found = Array.BinarySearch(HazardBefore, point);

@@ -31,7 +31,7 @@ public static class RareEvents
         int done = 0;
         SplittingTrace[] traces = new SplittingTrace[plan.Ladders];
         int next = 0;
-        Parallel.For(0, Math.Min(threads, plan.Ladders), new ParallelOptions { MaxDegreeOfParallelism = threads }, _ =>
+        Parallel.For(0, Math.Min(threads, plan.Ladders), new ParallelOptions { MaxDegreeOfParallelism = threads, CancellationToken = cancel }, _ =>
         {
             for (int number = Interlocked.Increment(ref next) - 1; number < traces.Length; number = Interlocked.Increment(ref next) - 1)
             {

@@ -83,12 +83,11 @@ internal sealed class SplittingRun
         {
             cancel.ThrowIfCancellationRequested();
             shots++;
-            chain.DrawAnew(ladder.Levels[0], ref random);
-            if (chain.Fails())
+            if (chain.DrawAnew(ladder.Levels[0], ref random))
             {
                 if (failures < plan.Walkers)
                 {
-                    above.Add(chain.Set.Faults, failures);
+                    above.Add(chain.Faults, failures);
                 }
 
                 failures++;
@@ -110,12 +109,12 @@ internal sealed class SplittingRun
         for (int walker = 0; walker < plan.Walkers; walker++)
         {
             cancel.ThrowIfCancellationRequested();
-            chain.Set.SetTo(above.At(beginnings[walker]));
+            chain.StartFrom(above.At(beginnings[walker]));
             int root = above.RootOf(beginnings[walker]);
             for (int sample = 0; sample < plan.SamplesPerLevel; sample++)
             {
                 made += chain.Walk(level, plan.MovesPerSample, ref random);
-                ReadOnlySpan<int> faults = chain.Set.Faults;
+                ReadOnlySpan<int> faults = chain.Faults;
                 double log = level.LogProbabilityOf(faults);
                 up[here.Count] = log - higher.LogProbabilityOf(faults);
                 down[here.Count] = lower.LogProbabilityOf(faults) - log;
