@@ -1,7 +1,7 @@
 namespace FtEstimate.Simulation.RareEvents;
 
 /// <summary>How much work a rare event is worth, and where its ladder of noise levels begins and ends.</summary>
-/// <param name="Start">Noise of the first level, where failures are common: a failure in some ten to a hundred shots is good.</param>
+/// <param name="Start">Noise of the first level, where failures are common: a failure in some ten to a hundred shots is good; without failures the first level never ends.</param>
 /// <param name="Target">Noise of the last level, above 0 and below <paramref name="Start"/>.</param>
 /// <param name="Seed">Seed; the same seed gives the same estimate whatever the number of threads.</param>
 /// <param name="Ladders">Independent repetitions of everything, at least 2: their spread is the error bar.</param>

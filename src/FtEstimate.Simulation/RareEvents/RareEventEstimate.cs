@@ -33,19 +33,22 @@ public sealed record RareEventEstimate(
 {
     private const double BelowUpperEnd = 0.975;
 
+    /// <summary>Below any that differs from rounding; ladders that agree to the last digit would else be worth infinitely many.</summary>
+    private const double SmallestVariance = 1e-30;
+
     /// <summary>Failures per shot at the target.</summary>
     public double Probability => Levels[^1].Probability;
 
     /// <summary>Standard error as a fraction of the probability; the error of plain Monte Carlo at the first level is in it.</summary>
     public double RelativeStandardError => Levels[^1].RelativeStandardError;
 
-    /// <summary>Failures that plain Monte Carlo would have to see for the same standard error.</summary>
-    public double EquivalentFailures => 1 / Math.Max(RelativeStandardError * RelativeStandardError, double.Epsilon);
+    /// <summary>Effective samples: failures that plain Monte Carlo would have to see for the same standard error.</summary>
+    public double EquivalentFailures => 1 / Math.Max(RelativeStandardError * RelativeStandardError, SmallestVariance);
 
     /// <summary>The probability with its 95 % interval: Student's, on the logarithm, which keeps the lower end positive.</summary>
     public ErrorEstimate PerShot()
     {
         double factor = Math.Exp(StudentT.InvCDF(0, 1, LadderProbabilities.Length - 1, BelowUpperEnd) * RelativeStandardError);
-        return new ErrorEstimate(Probability, Probability / factor, Probability * factor);
+        return new ErrorEstimate(Probability, Probability / factor, Math.Min(Probability * factor, 1));
     }
 }

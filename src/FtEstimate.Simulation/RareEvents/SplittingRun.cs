@@ -28,6 +28,7 @@ internal sealed class SplittingRun
     private readonly double[] down;
     private readonly double[] up;
     private readonly double[] downAbove;
+    private readonly int[] beginnings;
     private SamplePool above = new();
     private SamplePool here = new();
     private RandomBits random;
@@ -44,6 +45,7 @@ internal sealed class SplittingRun
         down = new double[samples];
         up = new double[samples];
         downAbove = new double[samples];
+        beginnings = new int[plan.Walkers];
     }
 
     /// <summary>Climbs down.</summary>
@@ -102,8 +104,7 @@ internal sealed class SplittingRun
         NoiseLevel level = ladder.Levels[number];
         NoiseLevel higher = ladder.Levels[Math.Max(number - 1, 0)];
         NoiseLevel lower = ladder.Levels[Math.Min(number + 1, ladder.Levels.Length - 1)];
-        Span<int> beginnings = stackalloc int[plan.Walkers];
-        ChooseBeginnings(number, beginnings);
+        ChooseBeginnings(number);
         here.Clear();
         long made = 0;
         for (int walker = 0; walker < plan.Walkers; walker++)
@@ -126,7 +127,7 @@ internal sealed class SplittingRun
     }
 
     // evenly spaced points on the summed weights: the number of copies of a sample is its share, rounded up or down
-    private void ChooseBeginnings(int level, Span<int> beginnings)
+    private void ChooseBeginnings(int level)
     {
         if (level == 0)
         {

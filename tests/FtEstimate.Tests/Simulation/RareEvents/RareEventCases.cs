@@ -8,7 +8,7 @@ namespace FtEstimate.Tests.Simulation.RareEvents;
 internal static class RareEventCases
 {
     public static RareEventEstimate Run(Func<double, MemoryModel> modelAt, LadderPlan plan, int threads = 2) =>
-        FtEstimate.Simulation.RareEvents.RareEvents.Estimate(modelAt, plan, threads, null, CancellationToken.None);
+        Splitting.Estimate(modelAt, plan, threads, null, CancellationToken.None);
 
     public static MemoryModel ModelOf(DetectorGraph graph) => new(graph, [.. graph.Edges.Select(edge => edge.Probability)], []);
 

@@ -12,7 +12,7 @@ public readonly record struct LadderProgress(int Done, int Total);
 /// Failure probabilities far below what plain Monte Carlo can see, by splitting: plain Monte Carlo where failures are common, then ratios between
 /// neighbouring noise levels from chains that stay among the failing sets (Bravyi 2013, arXiv:1308.6270).
 /// </summary>
-public static class RareEvents
+public static class Splitting
 {
     /// <summary>Estimates the failure probability at the target noise; the decoder is exact matching with the weights of the target.</summary>
     /// <param name="modelAt">The experiment at a noise level; mechanisms may differ between levels in their probabilities only.</param>

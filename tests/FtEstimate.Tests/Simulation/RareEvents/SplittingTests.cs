@@ -8,7 +8,7 @@ using FtEstimate.Tests.Simulation.Decoding.Matching;
 namespace FtEstimate.Tests.Simulation.RareEvents;
 
 /// <summary>What an estimate promises besides its number, and circuits too large for exact sums.</summary>
-public sealed class RareEventsTests
+public sealed class SplittingTests
 {
     private static readonly LadderPlan Short = new(0.1, 0.05, 1, Ladders: 4, StartFailures: 16, Walkers: 8, SamplesPerLevel: 2, MovesPerSample: 4);
 
@@ -36,7 +36,7 @@ public sealed class RareEventsTests
         const double Published = 3.372e-8;
         const int Rounds = 39;
         RareEventEstimate estimate = RareEventCases.Run(
-            p => RareEventCases.Textbook(13, Rounds, PauliBasis.X, p), new LadderPlan(3.5e-3, 1e-3, 1, Ladders: 16, StartFailures: 128));
+            p => RareEventCases.Textbook(13, Rounds, PauliBasis.X, p), new LadderPlan(3.5e-3, 1e-3, 1, StartFailures: 128, Walkers: 128));
         double error = Math.Sqrt((1 / 520.0) + Math.Pow(estimate.RelativeStandardError, 2));
 
         Assert.Equal(1, MemoryError.PerRound(estimate.Probability, Rounds) / Published, 3 * error);
@@ -71,7 +71,7 @@ public sealed class RareEventsTests
     public void Progress_ends_with_every_level_of_every_ladder()
     {
         Latest progress = new();
-        RareEventEstimate estimate = FtEstimate.Simulation.RareEvents.RareEvents.Estimate(BitFlips, Short, 1, progress, CancellationToken.None);
+        RareEventEstimate estimate = Splitting.Estimate(BitFlips, Short, 1, progress, CancellationToken.None);
 
         int total = Short.Ladders * estimate.Levels.Length;
         Assert.Equal(new LadderProgress(total, total), progress.Value);
@@ -79,7 +79,7 @@ public sealed class RareEventsTests
 
     [Fact]
     public void An_interrupted_estimate_gives_no_number() => Assert.ThrowsAny<OperationCanceledException>(() =>
-        FtEstimate.Simulation.RareEvents.RareEvents.Estimate(BitFlips, Short, 2, null, new CancellationToken(canceled: true)));
+        Splitting.Estimate(BitFlips, Short, 2, null, new CancellationToken(canceled: true)));
 
     [Fact]
     public void Levels_of_different_codes_are_refused() => Assert.Throws<ArgumentException>(() =>

@@ -7,7 +7,7 @@ using FtEstimate.Tests.Simulation.Decoding.Matching;
 namespace FtEstimate.Tests.Simulation.RareEvents;
 
 /// <summary>Splitting against failure probabilities that are known exactly.</summary>
-public sealed class RareEventsExactTests
+public sealed class SplittingExactTests
 {
     // bit flips on the rotated code of distance 5, perfect checks, p = 0.1/256: exact enumeration of all sets of flipped qubits; 13 digits were printed
     private const double PerfectChecksAtTheTarget = 1.735589217363e-8;
