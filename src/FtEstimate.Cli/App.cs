@@ -22,6 +22,7 @@ public static class App
             FactoriesCommand.Create(),
             MemoryCommand.Create(),
             ValidationCommand.Create(),
+            RareCommand.Create(),
             CalibrateCommand.Create(),
         };
         root.SetAction(parsed => new System.CommandLine.Help.HelpAction().Invoke(parsed));
