@@ -7,7 +7,7 @@ using FtEstimate.Simulation.Sampling;
 
 namespace FtEstimate.Benchmarks;
 
-/// <summary>How long a decoder takes for one shot of a memory of distance 17 over 51 rounds.</summary>
+/// <summary>How long a decoder takes for one shot: the textbook circuit with noise at every place, three rounds per distance.</summary>
 [MemoryDiagnoser]
 public class DecoderBenchmarks
 {
@@ -19,13 +19,16 @@ public class DecoderBenchmarks
     [Params(DecoderKind.Matching, DecoderKind.UnionFind)]
     public DecoderKind Kind { get; set; }
 
-    [Params(1e-3, 3e-3)]
+    [Params(5, 11, 17)]
+    public int Distance { get; set; }
+
+    [Params(1e-3, 5e-3)]
     public double Error { get; set; }
 
     [GlobalSetup]
     public void Draw()
     {
-        MemoryModel model = FaultPropagation.Of(TextbookCircuit.Of(17, 51, PauliBasis.Z, UniformNoise.EveryPlace(Error)));
+        MemoryModel model = FaultPropagation.Of(TextbookCircuit.Of(Distance, 3 * Distance, PauliBasis.Z, UniformNoise.EveryPlace(Error)));
         var sampler = new MechanismSampler(model);
         sampler.Begin(1, 0);
         for (int shot = 0; shot < Shots; shot++)

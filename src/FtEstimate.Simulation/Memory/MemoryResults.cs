@@ -48,7 +48,7 @@ public sealed record MemoryResults(
     public static MemoryResults Of(ImmutableArray<MemoryCounts> shards)
     {
         MemoryCounts first = shards[0];
-        IScalingLaw law = ScalingLaws.Named(first.Origin.LawName) ?? ScalingLaws.PublishedFit;
+        IScalingLaw law = ScalingLaws.Named(first.Origin.LawName) ?? ScalingLaws.Simulated;
         ImmutableArray<ExperimentResult> experiments =
         [
             .. first.Question.Settings.Select((setting, index) => new ExperimentResult(

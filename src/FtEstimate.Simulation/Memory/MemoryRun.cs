@@ -60,7 +60,8 @@ public static class MemoryRun
     public static MemoryTally Run(
         MemoryExperiment experiment, MemoryPlan plan, MemoryTally from, int threads, IProgress<MemoryTally>? progress, CancellationToken cancel)
     {
-        Worker[] workers = [.. Enumerable.Range(0, threads).Select(_ => new Worker(experiment, plan))];
+        // each thread makes its own, as that takes a while for large patches
+        Lazy<Worker>[] workers = [.. Enumerable.Range(0, threads).Select(_ => new Lazy<Worker>(() => new Worker(experiment, plan)))];
         MemoryTally tally = from;
         while (!IsDone(plan, tally) && !cancel.IsCancellationRequested)
         {
@@ -92,7 +93,7 @@ public static class MemoryRun
         return look;
     }
 
-    private static MemoryTally RunTo(long end, Worker[] workers, MemoryTally from, IProgress<MemoryTally>? progress, CancellationToken cancel)
+    private static MemoryTally RunTo(long end, Lazy<Worker>[] workers, MemoryTally from, IProgress<MemoryTally>? progress, CancellationToken cancel)
     {
         long next = from.BlocksDone;
         MemoryTally tally = from;
@@ -107,7 +108,7 @@ public static class MemoryRun
                     return;
                 }
 
-                ShotCount count = worker.Run(block);
+                ShotCount count = worker.Value.Run(block);
                 lock (gate)
                 {
                     tally = new MemoryTally(tally.BlocksDone + 1, tally.Count + count);

@@ -44,7 +44,7 @@ public sealed record MemorySubject(MemoryNoise Noise, MemoryOrigin Origin)
     /// <param name="error">The number they follow from.</param>
     public static MemorySubject Of(UniformNoise rates, double error)
     {
-        IScalingLaw law = ScalingLaws.PublishedFit;
+        IScalingLaw law = ScalingLaws.Simulated;
         return new MemorySubject(
             new TextbookMemoryNoise(rates, error),
             new MemoryOrigin(
