@@ -42,7 +42,7 @@ public static class App
             Error = error,
             EnableDefaultExceptionHandler = false,
 
-            // the one command that runs long finishes its blocks, however long they take
+            // commands that run long listen for signals themselves and finish what they are at, however long they take
             ProcessTerminationTimeout = null,
         };
         try

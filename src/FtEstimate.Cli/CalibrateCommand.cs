@@ -38,12 +38,13 @@ internal static class CalibrateCommand
             return ExitStatus.WrongInput;
         }
 
+        using Interruption interruption = new(cancel);
         List<CalibrationResult> results = [.. reading.Results];
         while (results.Count < CalibrationGrid.Cells.Length)
         {
             int index = results.Count;
-            CalibrationResult result = CalibrationRun.Run(index, threads, cancel);
-            if (cancel.IsCancellationRequested)
+            CalibrationResult result = CalibrationRun.Run(index, threads, interruption.Token);
+            if (interruption.Token.IsCancellationRequested)
             {
                 return ExitStatus.Interrupted;
             }

@@ -1,6 +1,5 @@
 using System.Collections.Immutable;
 using System.CommandLine;
-using System.Runtime.InteropServices;
 using FtEstimate.Files;
 using FtEstimate.Files.Counts;
 using FtEstimate.Files.Scenarios;
@@ -71,22 +70,10 @@ internal static class MemoryCommand
     {
         MemoryCounts counts;
         bool isInterrupted;
-        using (CancellationTokenSource source = CancellationTokenSource.CreateLinkedTokenSource(cancel))
+        using (Interruption interruption = new(cancel))
         {
-            // batch systems announce the end of the time with SIGTERM; a second signal ends the program at once
-            using PosixSignalRegistration interrupt = PosixSignalRegistration.Create(PosixSignal.SIGINT, Stop);
-            using PosixSignalRegistration terminate = PosixSignalRegistration.Create(PosixSignal.SIGTERM, Stop);
-            counts = session.Run(begun, source.Token);
-            isInterrupted = source.IsCancellationRequested && !session.IsDone(counts);
-
-            void Stop(PosixSignalContext context)
-            {
-                if (!source.IsCancellationRequested)
-                {
-                    context.Cancel = true;
-                    source.Cancel();
-                }
-            }
+            counts = session.Run(begun, interruption.Token);
+            isInterrupted = interruption.Token.IsCancellationRequested && !session.IsDone(counts);
         }
 
         Fault? fault = places.Counts is { } path ? AtomicFile.Write(path, CountsFile.Text(counts)) : null;

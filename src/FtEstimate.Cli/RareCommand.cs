@@ -13,7 +13,10 @@ namespace FtEstimate.Cli;
 /// <summary>`rare --uniform P --distance D`: a logical error too rare for plain Monte Carlo, by splitting.</summary>
 internal static class RareCommand
 {
+    private const double SmallestUniform = 1e-5;
     private const double LargestUniform = 0.02;
+    private const int MostRounds = 1000;
+    private const int MostWalkers = 100_000;
 
     /// <summary>Failures per shot at the first level: one in some thirty is common enough, and leaves a short ladder.</summary>
     private const double CommonFailure = 0.03;
@@ -23,7 +26,7 @@ internal static class RareCommand
     {
         Option<double?> uniform = new("--uniform")
         {
-            Description = "Error probability of the textbook circuit", HelpName = "P", Required = true, CustomParser = CommandLineNumbers.Between("--uniform", 0, LargestUniform),
+            Description = "Error probability of the textbook circuit", HelpName = "P", Required = true, CustomParser = CommandLineNumbers.Between("--uniform", SmallestUniform, LargestUniform),
         };
         Option<string> noise = new("--noise") { Description = "How rates follow from P", DefaultValueFactory = _ => "every-place" };
         noise.AcceptOnlyFromAmong("every-place", "slow-readout");
@@ -62,9 +65,10 @@ internal static class RareCommand
         }
 
         LadderPlan plan = new(start, request.Error, (ulong)request.Seed, StartFailures: Math.Max(64, request.Walkers), Walkers: request.Walkers);
-        RareEventEstimate estimate = Splitting.Estimate(request.ModelAt, plan, request.Threads, null, cancel);
+        using Interruption interruption = new(cancel);
+        RareEventEstimate estimate = Splitting.Estimate(request.ModelAt, plan, request.Threads, null, interruption.Token);
         RareQuestion question = new(
-            request.Noise, request.Error, request.Distance, request.RoundsOrDefault, request.Basis.ToString(), ScalingLaws.Simulated.Name, request.LawPerRound(request.Error));
+            request.Noise, request.Error, request.Distance, request.RoundsOrDefault, request.Basis.ToString(), ScalingLaws.Simulated.Name, request.LawPerRound(request.Error), request.LawRemark());
         return ReportOutput.Write(RareReport.Of(question, plan, estimate), () => "{}", places, io.Output, io.Error) ? ExitStatus.Answer : ExitStatus.WrongInput;
     }
 
@@ -97,6 +101,13 @@ internal static class RareCommand
         public double LawPerRound(double error) =>
             0.5 * PatchError.PerRound(ScalingLaws.Simulated, PatchError.Uniform(ScalingLaws.Simulated, error), Math.Max(Distance, 3));
 
+        /// <summary>How far the law can be trusted here.</summary>
+        public string LawRemark()
+        {
+            string reach = ScalingLaws.Simulated.Reach(Error / ScalingLaws.Simulated.Threshold, Distance).Sentence;
+            return Noise == "slow-readout" ? $"It is asked for noise at every place, so the comparison is rough. {reach}" : reach;
+        }
+
         /// <summary>Noise at which failures are common, by the law.</summary>
         public double StartError()
         {
@@ -120,9 +131,14 @@ internal static class RareCommand
                 yield return new Fault("--uniform", 0, 0, "", $"failures are not rare at {Show.Probability(Error)}: `memory` counts them directly");
             }
 
-            if (Walkers < 2)
+            if (Walkers is < 2 or > MostWalkers)
             {
-                yield return new Fault("--walkers", 0, 0, "", $"expected at least 2, found {Walkers}");
+                yield return new Fault("--walkers", 0, 0, "", $"expected at least 2 and at most {MostWalkers}, found {Walkers}");
+            }
+
+            if (Rounds > MostRounds)
+            {
+                yield return new Fault("--rounds", 0, 0, "", $"expected at most {MostRounds}, found {Rounds}");
             }
 
             if (Threads < 1)

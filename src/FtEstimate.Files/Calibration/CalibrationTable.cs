@@ -16,7 +16,7 @@ public static class CalibrationTable
     /// <summary>The first line.</summary>
     public const string Header =
         "mix,uniform,cz,gate_on_data,waiting_x,waiting_y,waiting_z,data_x,data_y,data_z,check_outside,check_between,flip,reset,"
-        + "data_loss,data_told,check_loss,check_told,looks,distance,basis,seed,shots,failures";
+        + "data_loss,data_told,check_loss,check_told,looks,distance,basis,seed,shots,failures,simulator";
 
     /// <summary>One line.</summary>
     public static string Line(CalibrationResult result)
@@ -32,6 +32,7 @@ public static class CalibrationTable
             }.Select(Number),
             Flag(e.DataLossTold), Number(e.CheckLossPerSlot), Flag(e.CheckLossTold), Number(e.RoundsBetweenLooks), Number(result.Cell.Distance),
             result.Cell.Basis.ToString(), result.Seed.ToString(CultureInfo.InvariantCulture), Number(result.Count.Shots), Number(result.Count.Failures),
+            Number(MemoryRun.Version),
         ]);
     }
 
@@ -45,7 +46,13 @@ public static class CalibrationTable
 
         try
         {
-            ImmutableArray<CalibrationResult> results = Read(File.ReadAllLines(path));
+            string[] lines = File.ReadAllLines(path);
+            if (lines is [] || lines[0] != Header)
+            {
+                return Wrong(path, 1, "is not the first line of a table of calibration results");
+            }
+
+            ImmutableArray<CalibrationResult> results = Read(lines);
             for (int index = 0; index < results.Length; index++)
             {
                 if (index >= CalibrationGrid.Cells.Length || Line(results[index] with { Count = default }) != Line(new CalibrationResult(CalibrationGrid.Cells[index], (ulong)index + 1, default)))
@@ -97,6 +104,11 @@ public static class CalibrationTable
             CheckLossTold = At(17) != 0,
             RoundsBetweenLooks = (int)At(18),
         };
+        if (At(24) != MemoryRun.Version || !(At(23) >= 0 && At(23) <= At(22) && At(22) >= 1))
+        {
+            throw new FormatException("a line of the calibration table comes from another version of the simulator, or has more failures than shots");
+        }
+
         CalibrationCell cell = new(fields[0], At(1), errors, (int)At(19), Enum.Parse<PauliBasis>(fields[20]));
         return new CalibrationResult(cell, ulong.Parse(fields[21], CultureInfo.InvariantCulture), new ShotCount((long)At(22), (long)At(23)));
     }

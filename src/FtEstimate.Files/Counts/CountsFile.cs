@@ -113,7 +113,11 @@ public static class CountsFile
 
         for (int i = 0; i < content.Counts.Length; i++)
         {
-            CountContent count = content.Counts[i];
+            if (content.Counts[i] is not { } count)
+            {
+                return null;
+            }
+
             MemoryPlan plan = question.PlanOf(question.Settings[i], shard);
             bool isSound = count.Blocks >= 0 && count.Blocks <= plan.BlocksOfShard && count.Shots == ShotsOf(plan, count.Blocks)
                 && count.Failures >= 0 && count.Failures <= count.Shots && count.Seconds >= 0;

@@ -14,7 +14,8 @@ namespace FtEstimate.Reports.Memory;
 /// <param name="Basis">Basis of the memory.</param>
 /// <param name="LawName">Law it is held against.</param>
 /// <param name="LawPerRound">What that law says for one observable per round.</param>
-public sealed record RareQuestion(string Noise, double Error, int Distance, int Rounds, string Basis, string LawName, double LawPerRound);
+/// <param name="LawRemark">How far the law can be trusted here.</param>
+public sealed record RareQuestion(string Noise, double Error, int Distance, int Rounds, string Basis, string LawName, double LawPerRound, string LawRemark);
 
 /// <summary>The report on a failure probability that plain Monte Carlo cannot see.</summary>
 public static class RareReport
@@ -39,7 +40,7 @@ public static class RareReport
                             + $"which would take about {Show.Significant(estimate.EquivalentFailures / estimate.Probability, 2)} shots."),
                     ]),
                 new ReportSection("Noise levels", [Levels(estimate)]),
-                new ReportSection("How it was done, and a check", [new BulletList(Method(plan, estimate))]),
+                new ReportSection("How it was done, and a check", [new BulletList(Method(question, plan, estimate))]),
             ]);
     }
 
@@ -56,11 +57,12 @@ public static class RareReport
         return table.Build();
     }
 
-    private static ImmutableArray<Bullet> Method(LadderPlan plan, RareEventEstimate estimate) =>
+    private static ImmutableArray<Bullet> Method(RareQuestion question, LadderPlan plan, RareEventEstimate estimate) =>
     [
         new("Method", "Splitting (Bravyi 2013, arXiv:1308.6270): plain Monte Carlo where failures are common, then ratios between neighbouring noise levels; see docs/simulation.md."),
         new("Decoder", "At every level that of the target, so failures at the levels above are a means to an end."),
         new("Work", $"{plan.Ladders} independent ladders of {plan.Walkers} chains; their spread is the error bar. {Show.Significant(estimate.StartShots, 3)} shots at the first level, at most {Show.Significant(estimate.Decodings, 3)} decodings in all. Seed {plan.Seed}."),
+        new("The law", question.LawRemark),
         new("Check", $"Ratios that look down only, free of bias however slowly chains move, give {Show.Significant(estimate.ForwardProbability, 3)} ± {Show.Percent(estimate.ForwardRelativeStandardError)} per shot. If that differs by more than both errors, chains were trapped."),
     ];
 }

@@ -64,7 +64,7 @@ public static class LawFit
         ImmutableArray<FitResidual> residuals =
             [.. rows.Select(row => new FitResidual(row.Result, Math.Exp(row.LogPerRound) / 2, Math.Exp(row.LogByLaw(best)) / 2))];
         IEnumerable<FittedNumber> numbers = Enumerable.Range(0, best.Count).Select(parameter => Number(parameter, best[parameter], fit.StandardErrors[parameter]));
-        return new FittedLaw([.. numbers, .. Quality(residuals, [.. fitted.Select(row => row.Strength(best))])], residuals);
+        return new FittedLaw([.. numbers, .. Quality(residuals, [.. fitted.Select(row => (row.Result.Cell.Distance, row.Strength(best)))])], residuals);
     }
 
     private static FittedNumber Number(int parameter, double value, double error)
@@ -75,7 +75,7 @@ public static class LawFit
     }
 
     /// <summary>How good the fit is and how far its data reach.</summary>
-    private static FittedNumber[] Quality(ImmutableArray<FitResidual> all, double[] strengths)
+    private static FittedNumber[] Quality(ImmutableArray<FitResidual> all, (int Distance, double Strength)[] points)
     {
         FitResidual[] fitted = [.. all.Where(residual => residual.Result.Cell.IsFitted)];
         return
@@ -85,8 +85,9 @@ public static class LawFit
             new("Experiments", fitted.Length, 0),
             new("Shots", fitted.Sum(residual => (double)residual.Result.Count.Shots), 0),
             new("LargestDistance", fitted.Max(residual => residual.Result.Cell.Distance), 0),
-            new("SmallestStrength", strengths.Min(), 0),
-            new("LargestStrength", strengths.Max(), 0),
+            new("SmallestStrength", points.Min(point => point.Strength), 0),
+            new("SmallestStrengthAtLargestDistance", points.Where(point => point.Distance == points.Max(other => other.Distance)).Min(point => point.Strength), 0),
+            new("LargestStrength", points.Max(point => point.Strength), 0),
         ];
     }
 }

@@ -101,7 +101,7 @@ public sealed record ChannelWeights(ImmutableArray<double> Values)
         };
     }
 
-    /// <summary>Data atoms sit half the time in the Hadamard frame, so both bases see half of either flip.</summary>
+    /// <summary>Data atoms sit half the time in the Hadamard frame, so both bases suffer from either flip; the weights hold what they see of it.</summary>
     private NoiseStrength Waiting(PauliChannel channel) =>
         Even(NoiseWeight.WaitingBitFlip, channel.X + channel.Y) + Even(NoiseWeight.WaitingPhaseFlip, channel.Z + channel.Y);
 

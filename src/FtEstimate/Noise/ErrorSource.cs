@@ -39,7 +39,7 @@ public enum ErrorLocation
     /// <summary>A check lost, per gate slot; its readout tells.</summary>
     ToldLossOfChecks,
 
-    /// <summary>A check lost, per gate slot; it reads as dark.</summary>
+    /// <summary>A check lost, per gate slot; its result is random and nobody tells.</summary>
     UntoldLossOfChecks,
 }
 

@@ -40,6 +40,10 @@ public readonly record struct PauliChannel(double X, double Y, double Z)
             (Z * nextKept) + (kept * next.Z) + (X * next.Y) + (Y * next.X));
     }
 
-    /// <summary>This channel so many times on average, first order in the broken part.</summary>
-    public PauliChannel Times(double count) => new(X * count, Y * count, Z * count);
+    /// <summary>This channel so many times on average, first order; the sum is cut at three quarters, where nothing is known of the qubit any more.</summary>
+    public PauliChannel Times(double count)
+    {
+        double factor = count * Total <= 0.75 ? count : 0.75 / Total;
+        return new(X * factor, Y * factor, Z * factor);
+    }
 }

@@ -27,7 +27,8 @@ public sealed class RareCommandTests
     [InlineData("--distance", "4", "odd number from 3 to 51")]
     [InlineData("--walkers", "1", "at least 2")]
     [InlineData("--threads", "0", "at least 1")]
-    [InlineData("--uniform", "0", "between 0 and 0.02")]
+    [InlineData("--uniform", "0", "between 1E-05 and 0.02")]
+    [InlineData("--rounds", "100000", "at most 1000")]
     [InlineData("--uniform", "0.015", "failures are not rare")]
     [InlineData("--seed", "1.5", "whole number")]
     public async Task A_question_that_cannot_be_asked_is_refused(string option, string value, string reason)
