@@ -26,7 +26,10 @@ internal static class RareCommand
     {
         Option<double?> uniform = new("--uniform")
         {
-            Description = "Error probability of the textbook circuit", HelpName = "P", Required = true, CustomParser = CommandLineNumbers.Between("--uniform", SmallestUniform, LargestUniform),
+            Description = "Error probability of the textbook circuit",
+            HelpName = "P",
+            Required = true,
+            CustomParser = CommandLineNumbers.Between("--uniform", SmallestUniform, LargestUniform),
         };
         Option<string> noise = new("--noise") { Description = "How rates follow from P", DefaultValueFactory = _ => "every-place" };
         noise.AcceptOnlyFromAmong("every-place", "slow-readout");

@@ -1,5 +1,5 @@
-using FtEstimate.Noise;
 using FtEstimate.Cycles;
+using FtEstimate.Noise;
 using FtEstimate.Simulation.Circuits;
 using FtEstimate.Simulation.Memory;
 using FtEstimate.Sizing;

@@ -59,9 +59,12 @@ internal static class MemoryPicture
         return PictureStyle.Svg(model, "memory", "Error per round against code distance, simulated and by the law", Height);
     }
 
+    /// <summary>A line of the legend; the fonts of readers are wider than the one it is measured with, and the legend cuts what does not fit.</summary>
+    private static string Label(string text) => text + new string('\u00A0', text.Length / 5);
+
     private static void AddLaw(PlotModel model, MemoryResults results)
     {
-        var line = new LineSeries { Title = $"law {results.Origin.LawName}", Color = PictureStyle.Quiet, StrokeThickness = 1.4, LineStyle = LineStyle.Dash };
+        var line = new LineSeries { Title = Label($"law {results.Origin.LawName}"), Color = PictureStyle.Quiet, StrokeThickness = 1.4, LineStyle = LineStyle.Dash };
         foreach (DistanceResult distance in results.Distances)
         {
             if (distance.Law > SmallestDrawn)
@@ -79,10 +82,10 @@ internal static class MemoryPicture
     private static void AddCounts(
         PlotModel model, ExperimentResult[] run, PauliBasis basis, MarkerType marker, OxyColor colour, double aside, double floor)
     {
-        var points = new ScatterSeries { Title = $"simulated, basis {basis}", MarkerType = marker, MarkerSize = 5, MarkerFill = colour };
+        var points = new ScatterSeries { Title = Label($"counted, basis {basis}"), MarkerType = marker, MarkerSize = 5, MarkerFill = colour };
         var bounds = new ScatterSeries
         {
-            Title = $"no failure, basis {basis}: upper end",
+            Title = Label($"no failure, basis {basis}: upper end"),
             MarkerType = marker,
             MarkerSize = 5,
             MarkerFill = OxyColors.White,
