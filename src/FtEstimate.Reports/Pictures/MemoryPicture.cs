@@ -25,17 +25,7 @@ internal static class MemoryPicture
     public static string Svg(MemoryResults results)
     {
         PlotModel model = PictureStyle.Model();
-        model.Legends.Add(new Legend
-        {
-            LegendPosition = LegendPosition.LeftBottom,
-            LegendPlacement = LegendPlacement.Inside,
-            LegendPadding = 8,
-            LegendMargin = 4,
-            LegendBackground = OxyColors.White,
-            LegendBorder = PictureStyle.Grid,
-            LegendFontSize = 12,
-            LegendLineSpacing = 6,
-        });
+        model.Legends.Add(PictureStyle.Legend(LegendPosition.LeftBottom));
         ExperimentResult[] run = [.. results.Experiments.Where(experiment => experiment.Count.Shots > 0)];
         (double low, double high) = Range(run, results.Distances);
         model.Axes.Add(PictureStyle.Styled(new ListedAxis(

@@ -1,6 +1,7 @@
 using System.Globalization;
 using OxyPlot;
 using OxyPlot.Axes;
+using OxyPlot.Legends;
 
 namespace FtEstimate.Reports.Pictures;
 
@@ -41,6 +42,19 @@ internal static class PictureStyle
         Background = OxyColors.White,
         PlotAreaBorderColor = OxyColors.Transparent,
         Padding = new OxyThickness(6, 8, 14, 6),
+    };
+
+    /// <summary>A legend inside the picture.</summary>
+    public static Legend Legend(LegendPosition position) => new()
+    {
+        LegendPosition = position,
+        LegendPlacement = LegendPlacement.Inside,
+        LegendPadding = 8,
+        LegendMargin = 4,
+        LegendBackground = OxyColors.White,
+        LegendBorder = Grid,
+        LegendFontSize = 12,
+        LegendLineSpacing = 6,
     };
 
     /// <summary>The usual look of an axis.</summary>

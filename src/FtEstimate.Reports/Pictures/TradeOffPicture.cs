@@ -22,17 +22,7 @@ internal static class TradeOffPicture
     {
         ImmutableArray<SizedMachine> shown = otherStyle is null || OtherMachinesSection.IndexOf(unbeaten, otherStyle) >= 0 ? unbeaten : unbeaten.Add(otherStyle);
         PlotModel model = PictureStyle.Model();
-        model.Legends.Add(new Legend
-        {
-            LegendPosition = LegendPosition.RightTop,
-            LegendPlacement = LegendPlacement.Inside,
-            LegendPadding = 8,
-            LegendMargin = 4,
-            LegendBackground = OxyColors.White,
-            LegendBorder = PictureStyle.Grid,
-            LegendFontSize = 12,
-            LegendLineSpacing = 6,
-        });
+        model.Legends.Add(PictureStyle.Legend(LegendPosition.RightTop));
         Extent atoms = Extent.Of(shown.Select(machine => machine.Atoms.Total));
         Extent seconds = Extent.Of(shown.Select(machine => machine.RunSeconds));
         model.Axes.Add(PictureStyle.Styled(new ListedAxis(LogTicks.Numbers(atoms.Low, atoms.High, 7))
