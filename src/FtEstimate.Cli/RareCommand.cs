@@ -69,7 +69,7 @@ internal static class RareCommand
 
         LadderPlan plan = new(start, request.Error, (ulong)request.Seed, StartFailures: Math.Max(64, request.Walkers), Walkers: request.Walkers);
         using Interruption interruption = new(cancel);
-        RareEventEstimate estimate = Splitting.Estimate(request.ModelAt, plan, request.Threads, null, interruption.Token);
+        RareEventEstimate estimate = Splitting.Estimate(request.ModelAt, plan, request.Threads, new RareProgress(io.Error), interruption.Token);
         RareQuestion question = new(
             request.Noise, request.Error, request.Distance, request.RoundsOrDefault, request.Basis.ToString(), ScalingLaws.Simulated.Name, request.LawPerRound(request.Error), request.LawRemark());
         return ReportOutput.Write(RareReport.Of(question, plan, estimate), () => "{}", places, io.Output, io.Error) ? ExitStatus.Answer : ExitStatus.WrongInput;
