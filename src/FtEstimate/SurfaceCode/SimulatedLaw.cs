@@ -17,6 +17,8 @@ public sealed class SimulatedLaw : IScalingLaw
     private static readonly double SmallestStrength = FittedNumbers.Value("SmallestStrength");
     private static readonly double SmallestStrengthAtLargest = FittedNumbers.Value("SmallestStrengthAtLargestDistance");
     private const int DistanceOfSmallest = 9;
+    private const int FarDistance = 21;
+    private const double FarUniformError = 1e-3;
     private static readonly double LargestStrength = FittedNumbers.Value("LargestStrength");
 
     /// <inheritdoc/>
@@ -45,9 +47,13 @@ public sealed class SimulatedLaw : IScalingLaw
         bool tooQuiet = x < SmallestAt(distance) * (1 - Tolerance.Relative);
         bool tooNoisy = x > LargestStrength * (1 + Tolerance.Relative);
         return tooFar || tooQuiet || tooNoisy
-            ? new LawReach(false, $"{range}; beyond that the law is extrapolated, and rather too high for large patches: twofold at distance 21 for the published uniform circuit at 1e-3. {quality} inside.")
+            ? new LawReach(false, $"{range}; beyond that the law is extrapolated: at distance {FarDistance} and a uniform error of 1e-3 it gives {Show.Significant(FarRatio, 2)} times the published fit. {quality} inside.")
             : new LawReach(true, $"{quality}. {range}.");
     }
+
+    /// <summary>The law over the published fit where published counts end: how far the extrapolation can be trusted.</summary>
+    private double FarRatio => LogicalErrorPerRound(FarUniformError / Threshold, FarDistance)
+        / ScalingLaws.PublishedFit.LogicalErrorPerRound(FarUniformError / ScalingLaws.PublishedFit.Threshold, FarDistance);
 
     /// <summary>Large patches with little noise hardly fail, so the experiments at large distances begin at larger strengths.</summary>
     private static double SmallestAt(int distance) => distance <= DistanceOfSmallest
